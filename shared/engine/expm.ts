@@ -41,15 +41,21 @@ export class Exponential {
   /**
    * exp(Q years), row by row.
    * @param rates one a place, per year, 0 or more (NaN and infinities give NaN)
+   * @param only the one row wanted, where not all are: the others are then undefined
    * @returns a matrix that the next call overwrites
    */
-  compute(rates: Float64Array, years: number): Float64Array {
+  compute(rates: Float64Array, years: number, only?: number): Float64Array {
     const fastest = this.sumExits(rates);
     const { size, result } = this;
     if (!(fastest * years < Number.MAX_VALUE)) return result.fill(Number.NaN);
+    if (fastest === 0) return identity(result, size);
     const halvings = Math.max(0, Math.ceil(Math.log2((fastest * years) / LARGEST_STEP)));
     const step = years / 2 ** halvings;
-    for (let row = 0; row < size; row++) this.sumRow(row, rates, fastest, step);
+    for (let row = 0; row < size; row++) {
+      if (only === undefined || row === only || halvings > 0) {
+        this.sumRow(row, rates, fastest, step);
+      }
+    }
     for (let k = 0; k < halvings; k++) this.square();
     return result;
   }
@@ -107,6 +113,12 @@ export class Exponential {
     }
     result.set(work);
   }
+}
+
+function identity(matrix: Float64Array, size: number): Float64Array {
+  matrix.fill(0);
+  for (let i = 0; i < size; i++) matrix[i * size + i] = 1;
+  return matrix;
 }
 
 /**

@@ -31,7 +31,7 @@ export type Operation =
     }
   /** A number made into a column. */
   | { readonly op: 'spread'; readonly a: NodeId }
-  /** Chosen entries of the exponential of a generator; see expm.ts. */
+  /** The first row of the exponential of a generator; see expm.ts. */
   | {
       readonly op: 'exponential';
       readonly years: number;
@@ -39,8 +39,6 @@ export type Operation =
       /** Row and column of each rate in `rates`. */
       readonly places: readonly (readonly [number, number])[];
       readonly rates: readonly NodeId[];
-      /** Entries wanted, in the order that `entry` nodes pick them. */
-      readonly wanted: readonly (readonly [number, number])[];
     }
   | { readonly op: 'entry'; readonly of: NodeId; readonly index: number };
 
@@ -119,20 +117,19 @@ export class Graph {
     return this.add(`a${key}(${columns}`, { op: 'apply', key, fn, args: columns }, columns);
   }
 
-  /** Chosen entries of exp(Q years), Q holding `rates` at `places`; one node an entry. */
+  /** The first row of exp(Q years), Q holding `rates` at `places`; one node an entry. */
   exponential(
     size: number,
     places: readonly (readonly [number, number])[],
     rates: readonly NodeId[],
     years: number,
-    wanted: readonly (readonly [number, number])[],
   ): NodeId[] {
     const columns = this.columns(...rates);
-    const key = `e${size};${years};${places.join(' ')};${columns};${wanted.join(' ')}`;
-    const operation: Operation = { op: 'exponential', size, places, rates: columns, years, wanted };
-    const all = this.add(key, operation, columns);
-    return wanted.map((_, index) =>
-      this.add(`i${all}.${index}`, { op: 'entry', of: all, index }, [all]),
+    const key = `e${size};${years};${places.join(' ')};${columns}`;
+    const operation: Operation = { op: 'exponential', size, places, rates: columns, years };
+    const row = this.add(key, operation, columns);
+    return Array.from({ length: size }, (_, index) =>
+      this.add(`i${row}.${index}`, { op: 'entry', of: row, index }, [row]),
     );
   }
 
