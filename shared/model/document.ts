@@ -6,6 +6,7 @@
  * Objects are loose: fields of a newer minor version survive a round trip.
  * Everything inside is addressed by stable ids, never by position.
  */
+import './no-eval.ts';
 import { z } from 'zod';
 import { KINDS } from './kinds.ts';
 import { HOSTILE_KEYS } from './names.ts';
@@ -73,6 +74,8 @@ const question = z.looseObject({
   /** How state payoffs are counted within a cycle. */
   counting: z.enum(['start', 'end', 'trapezoid', 'simpson']),
   thresholds: z.array(threshold).min(1).max(20),
+  /** Id of the threshold in force; the first where absent. */
+  thresholdInForce: id.optional(),
   currency: z.looseObject({
     /** ISO 4217; XTS is the test code. */
     code: z.string().regex(/^[A-Z]{3}$/),
