@@ -24,8 +24,8 @@ const operators: Record<string, Meaning> = {
 };
 
 const arithmetic: Record<string, Meaning> = {
-  min: (...list) => list.reduce((a, b) => (b < a ? b : a)),
-  max: (...list) => list.reduce((a, b) => (b > a ? b : a)),
+  min: (...list) => Math.min(...list),
+  max: (...list) => Math.max(...list),
   sum: (...list) => list.reduce((a, b) => a + b, 0),
   product: (...list) => list.reduce((a, b) => a * b, 1),
   abs: (a = 0) => (a < 0 ? -a : a),
