@@ -3,7 +3,6 @@ import { describe, expect, it } from 'vitest';
 import { netBenefit } from '../../shared/analysis/net-benefit.ts';
 import type { Option } from '../../shared/analysis/option.ts';
 import { options, RUNS } from './arbitrary.ts';
-import { expectClose } from './close.ts';
 import { optionsOf, tables } from './golden.ts';
 
 // Source: tests/golden (base R 4.2.2), to 1e-10 x max(1, |want|) as the README there says.
