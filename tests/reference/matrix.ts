@@ -13,9 +13,18 @@ export function identity(size: number): Matrix {
 }
 
 export function multiply(a: Matrix, b: Matrix): Matrix {
-  return a.map((row) =>
-    row.map((_, j) => row.reduce((sum, x, k) => sum + x * ((b[k] as number[])[j] as number), 0)),
-  );
+  return a.map((row) => {
+    const sums = new Array<number>(row.length).fill(0);
+    for (let k = 0; k < row.length; k++) {
+      const factor = row[k] as number;
+      const other = b[k] as number[];
+      if (factor === 0) continue;
+      for (let j = 0; j < row.length; j++) {
+        sums[j] = (sums[j] as number) + factor * (other[j] as number);
+      }
+    }
+    return sums;
+  });
 }
 
 /**
@@ -30,7 +39,7 @@ export function exponential(matrix: Matrix): Matrix {
   const small = matrix.map((row) => row.map((x) => x / 2 ** halvings));
   let term = identity(matrix.length);
   let sum = term;
-  for (let n = 1; n <= 18; n++) {
+  for (let n = 1; n <= 14; n++) {
     term = multiply(term, small).map((row) => row.map((x) => x / n));
     sum = sum.map((row, i) => row.map((x, j) => x + ((term[i] as number[])[j] as number)));
   }
