@@ -29,16 +29,17 @@ export class Executor {
     const { operation, args } = instruction;
     const { kernels } = this;
     const out = address(instruction.out, cycle);
-    const arg = (k: number) => address(args[k]!, cycle);
+    const a = args.length > 0 ? address(args[0]!, cycle) : 0;
+    const b = args.length > 1 ? address(args[1]!, cycle) : 0;
     switch (operation.op) {
       case 'binary':
-        return kernels.binary(operation.name, out, arg(0), arg(1), length);
+        return kernels.binary(operation.name, out, a, b, length);
       case 'unary':
-        return kernels.unary(operation.name, out, arg(0), length);
+        return kernels.unary(operation.name, out, a, length);
       case 'select':
-        return kernels.select(out, arg(0), arg(1), arg(2), length);
+        return kernels.select(out, a, b, address(args[2]!, cycle), length);
       case 'spread':
-        return kernels.spread(out, arg(0), length);
+        return kernels.spread(out, a, length);
       case 'apply':
         return kernels.apply(
           operation.fn,

@@ -32,6 +32,9 @@ const lnOneMinus = (graph: Graph, p: NodeId) => graph.unary('log1p', graph.unary
 
 const oneMinus = (graph: Graph, p: NodeId) => graph.binary('subtract', graph.constant(1), p);
 
+/** Nothing has happened before the clock starts. */
+const since = (graph: Graph, time: NodeId) => graph.binary('max', graph.constant(0), time);
+
 const own: Record<string, Lower> = {
   if: (graph, [c, a, b]) => graph.select(c!, a!, b!),
   min: chained('min'),
@@ -68,9 +71,12 @@ const own: Record<string, Lower> = {
   competing: (graph, [rate, total, years]) =>
     graph.binary('multiply', rate!, graph.binary('exposure', total!, years!)),
   alive_exponential: (graph, [time, rate]) =>
-    graph.unary('exp', graph.unary('negate', graph.binary('multiply', rate!, time!))),
+    graph.unary(
+      'exp',
+      graph.unary('negate', graph.binary('multiply', rate!, since(graph, time!))),
+    ),
   alive_weibull: (graph, [time, shape, scale]) => {
-    const scaled = graph.binary('power', graph.binary('divide', time!, scale!), shape!);
+    const scaled = graph.binary('power', graph.binary('divide', since(graph, time!), scale!), shape!);
     return graph.unary('exp', graph.unary('negate', scaled));
   },
 };

@@ -67,4 +67,4 @@ export interface DrawsBlock {
 }
 
 /** Draws per block: fixed, so that results do not depend on the number of workers. */
-export const BLOCK_DRAWS = 250;
+export const BLOCK_DRAWS = 125;

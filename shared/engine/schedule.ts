@@ -130,7 +130,7 @@ class Scheduler {
   }
 
   program(): Program {
-    const { layout, model } = this;
+    const { layout } = this;
     const leaves = this.leaves();
     const once = this.stage('once', this.union());
     const tape = this.stage('tape', this.union());

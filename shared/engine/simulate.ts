@@ -125,7 +125,7 @@ export class Simulator {
       this.countVarying(strategy, now, 'start', cycle, draws);
       this.step(strategy, now, then, cycle, draws);
       this.countVarying(strategy, then, 'end', cycle, draws);
-      this.countSojourns(strategy, then, cycle + 1, draws);
+      this.countSojourns(strategy, then, cycle + 1, draws, !strategy.program.curves);
       listener.boundary?.(profile, index, cycle + 1, this.kernels.memory, then.base);
     }
     this.close(strategy, draws);
@@ -145,7 +145,7 @@ export class Simulator {
     for (const { tally, value } of atStart) {
       kernels.addScaled(work.tallies + tally * width, address(value, 0), 1, draws);
     }
-    this.countSojourns(strategy, strategy.sides[0]!, 0, draws);
+    this.countSojourns(strategy, strategy.sides[0]!, 0, draws, false);
   }
 
   private step(
@@ -165,21 +165,29 @@ export class Simulator {
     }
     for (let k = 0; k < now.steps.length; k++) {
       const { left, right } = now.steps[k]!;
-      this.kernels.dot(then.base + k * width, left, right.at(cycle), draws);
+      const out = then.base + k * width;
+      const sojourn = strategy.firstSojourn[k]!;
+      const weight = sojourn < 0 ? 0 : this.weight(strategy, sojourn, cycle + 1);
+      if (weight === 0) this.kernels.dot(out, left, right.at(cycle), draws);
+      else {
+        const sum = this.program.work.sojourns + sojourn * width;
+        this.kernels.dotAdding(out, left, right.at(cycle), sum, weight, draws);
+      }
     }
   }
 
+  /** @param stepped whether the step has counted each substate's first sojourn already */
   private countSojourns(
     strategy: PreparedStrategy,
     side: Side,
     boundary: number,
     draws: number,
+    stepped: boolean,
   ): void {
     const { width, work } = this.program;
-    const { sojourns } = strategy.program;
-    for (let k = 0; k < sojourns.length; k++) {
-      const weight = this.set(sojourns[k]!.set).boundary[boundary]!;
-      if (weight === 0) continue;
+    for (let k = 0; k < side.sojourns.length; k++) {
+      const weight = this.weight(strategy, k, boundary);
+      if (weight === 0 || (stepped && strategy.isFirst[k])) continue;
       this.kernels.addScaled(work.sojourns + k * width, side.sojourns[k]!, weight, draws);
     }
   }
@@ -213,6 +221,10 @@ export class Simulator {
     }
   }
 
+  private weight(strategy: PreparedStrategy, sojourn: number, boundary: number): number {
+    return this.set(strategy.program.sojourns[sojourn]!.set).boundary[boundary]!;
+  }
+
   private set(index: number): WeightSet {
     return this.accounts.sets[index]!;
   }
@@ -237,6 +249,10 @@ interface PreparedStrategy {
   readonly program: StrategyProgram;
   readonly occupancy: readonly [number, number];
   readonly sides: readonly Side[];
+  /** By followed substate, its first sojourn: counted in the pass of the step; -1 for none. */
+  readonly firstSojourn: Int32Array;
+  /** By sojourn, whether it is the first of its substate. */
+  readonly isFirst: readonly boolean[];
 }
 
 /** The factors' addresses at a cycle; rewritten only where some are on a tape. */
@@ -259,9 +275,13 @@ class Factors {
 
 function prepare(strategy: StrategyProgram, program: Program): PreparedStrategy {
   const { occupancy } = program.work;
+  const first = (substate: number) =>
+    strategy.sojourns.findIndex((sojourn) => sojourn.substate === substate);
   return {
     program: strategy,
     occupancy,
+    firstSojourn: strategy.followed.map(first),
+    isFirst: strategy.sojourns.map(({ substate }, k) => first(substate) === k),
     sides: occupancy.map((base) => side(strategy, base, program.width)),
   };
 }

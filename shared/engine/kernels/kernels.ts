@@ -33,6 +33,15 @@ export interface Kernels {
   fill(out: Address, value: number, length: number): void;
   /** out = sum over terms of left * right, in the order of the terms */
   dot(out: Address, left: Int32Array, right: Int32Array, length: number): void;
+  /** The same, and sum += weight * out. */
+  dotAdding(
+    out: Address,
+    left: Int32Array,
+    right: Int32Array,
+    sum: Address,
+    weight: number,
+    length: number,
+  ): void;
   /** out += weight * a */
   addScaled(out: Address, a: Address, weight: number, length: number): void;
   /** out += a * b */

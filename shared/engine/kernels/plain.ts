@@ -1,6 +1,6 @@
 /** The kernels as plain loops over one Float64Array. */
 import { type BinaryOp, binaryMeaning, type UnaryOp, unaryMeaning } from '../operations.ts';
-import { dotInto } from './dot.ts';
+import { addProductInto, addScaledInto, dotAddingInto, dotInto } from './dot.ts';
 import type { Address, Kernels } from './kernels.ts';
 
 type UnaryLoop = (m: Float64Array, out: Address, a: Address, length: number) => void;
@@ -88,12 +88,10 @@ export function plainKernels(memory: Float64Array): Kernels {
     copy: (out, a, length) => void m.copyWithin(out, a, a + length),
     fill: (out, value, length) => void m.fill(value, out, out + length),
     dot: (out, left, right, length) => dotInto(m, out, left, right, length),
-    addScaled(out, a, weight, length) {
-      for (let i = 0; i < length; i++) m[out + i] = m[out + i]! + weight * m[a + i]!;
-    },
-    addProduct(out, a, b, length) {
-      for (let i = 0; i < length; i++) m[out + i] = m[out + i]! + m[a + i]! * m[b + i]!;
-    },
+    dotAdding: (out, left, right, sum, weight, length) =>
+      dotAddingInto(m, out, left, right, sum, weight, length),
+    addScaled: (out, a, weight, length) => addScaledInto(m, out, a, weight, length),
+    addProduct: (out, a, b, length) => addProductInto(m, out, a, b, length),
     countOutside(a, low, high, length) {
       let count = 0;
       for (let i = 0; i < length; i++) {
