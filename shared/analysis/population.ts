@@ -16,21 +16,24 @@ export type Timing = 'startOfYear' | 'endOfYear' | 'midYear' | 'continuous';
 
 /**
  * Persons, discounted. Those prevalent count in full. A last year that is not whole
- * counts in proportion, at its own start, middle or end.
+ * counts in proportion, at its own start, middle or end. Whole years (and parts, counted
+ * at the start) give the same bits on every device; the other cases take a power that
+ * may differ in its last bit.
  * @param beneficiaries years above 0, discount rate above -1.
  */
 export function affectedPopulation(
   { incidence, prevalent, years, discountRate }: Beneficiaries,
   timing: Timing,
 ): number {
-  const force = Math.log1p(discountRate);
-  if (timing === 'continuous') return prevalent + incidence * integral(force, years);
+  if (timing === 'continuous') return prevalent + incidence * integral(discountRate, years);
+  const factor = 1 / (1 + discountRate);
   const whole = Math.floor(years);
   const rest = years - whole;
-  const into = { startOfYear: 0, midYear: 0.5, endOfYear: 1 }[timing];
-  const wholeYears = Math.exp(-force * into) * geometric(force, whole);
-  const partYear = rest * Math.exp(-force * (whole + into * rest));
-  return prevalent + incidence * (wholeYears + partYear);
+  const { power, sum } = powers(factor, whole);
+  const wholeYears =
+    sum * { startOfYear: 1, midYear: Math.sqrt(factor), endOfYear: factor }[timing];
+  const into = rest * { startOfYear: 0, midYear: 0.5, endOfYear: 1 }[timing];
+  return prevalent + incidence * (wholeYears + rest * power * factor ** into);
 }
 
 /** A value per person and its standard error, for all of the population. */
@@ -45,12 +48,20 @@ export function forPopulation(
   };
 }
 
-/** Integral of exp(-force t) over [0, years]. */
-function integral(force: number, years: number): number {
+/** Integral of (1 + rate)^-t over [0, years]. */
+function integral(rate: number, years: number): number {
+  const force = Math.log1p(rate);
   return force === 0 ? years : -Math.expm1(-force * years) / force;
 }
 
-/** Sum of exp(-force t) for t = 0 .. count - 1, in closed form: years may be many. */
-function geometric(force: number, count: number): number {
-  return force === 0 ? count : Math.expm1(-force * count) / Math.expm1(-force);
+/**
+ * factor^count and the sum of factor^t for t = 0 .. count - 1, by doubling: years may be
+ * many, and products alone give the same bits on every device.
+ */
+function powers(factor: number, count: number): { power: number; sum: number } {
+  if (count === 0) return { power: 1, sum: 0 };
+  const half = powers(factor, Math.floor(count / 2));
+  const even = { power: half.power * half.power, sum: half.sum * (1 + half.power) };
+  if (count % 2 === 0) return even;
+  return { power: even.power * factor, sum: even.sum + even.power };
 }

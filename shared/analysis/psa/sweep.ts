@@ -33,11 +33,14 @@ export interface Sweep {
 
 /** Columns over the draws that are filled anew at each threshold. */
 interface Scratch {
+  /** Highest net benefit of the draw. */
   readonly top: Float64Array;
   /** How far below `top` still ties with it. */
   readonly slack: Float64Array;
+  /** By strategy, how far it falls short of `top`: exactly 0 where it ties with it. */
+  readonly losses: readonly Float64Array[];
+  /** How many strategies tie with `top`. */
   readonly winners: Uint16Array;
-  readonly loss: Float64Array;
 }
 
 /**
@@ -54,8 +57,8 @@ export function sweep(draws: Draws, thresholds: readonly number[]): Sweep {
   const scratch = {
     top: new Float64Array(count),
     slack: new Float64Array(count),
+    losses: draws.strategies.map(() => new Float64Array(count)),
     winners: new Uint16Array(count),
-    loss: new Float64Array(count),
   };
   return {
     strategies: draws.strategies,
@@ -73,18 +76,17 @@ function pointAt(
   const { rows, best } = netBenefit(averages, threshold);
   const bestIndex = rows.findIndex(({ id }) => id === best);
   fillHighest(draws, threshold, scratch);
-  countWinners(draws, threshold, scratch);
-  const probability = draws.strategies.map((_, s) => shareBest(draws, s, threshold, scratch));
+  scratch.winners.fill(0);
   const expectedLoss = draws.strategies.map((_, s) => fillLoss(draws, s, threshold, scratch));
-  fillLoss(draws, bestIndex, threshold, scratch);
+  const bestLoss = scratch.losses[bestIndex] as Float64Array;
   return {
     threshold,
     meanNmb: rows.map(({ nmb }) => nmb),
     best: bestIndex,
-    probability,
-    tiedShare: scratch.winners.reduce((n, k) => n + (k > 1 ? 1 : 0), 0) / scratch.top.length,
+    probability: scratch.losses.map((loss) => shareBest(loss, scratch.winners)),
+    tiedShare: shareTied(scratch.winners),
     expectedLoss,
-    lossSe: standardError(scratch.loss, expectedLoss[bestIndex] as number),
+    lossSe: standardError(bestLoss, expectedLoss[bestIndex] as number),
   };
 }
 
@@ -104,38 +106,39 @@ function fillHighest({ cost, health }: Draws, threshold: number, { top, slack }:
   }
 }
 
-function countWinners(draws: Draws, threshold: number, scratch: Scratch): void {
-  scratch.winners.fill(0);
-  for (let s = 0; s < draws.cost.length; s++) {
-    for (let i = 0; i < scratch.top.length; i++) {
-      if (wins(draws, s, i, threshold, scratch)) (scratch.winners[i] as number)++;
-    }
-  }
-}
-
-function shareBest(draws: Draws, s: number, threshold: number, scratch: Scratch): number {
-  let total = 0;
-  for (let i = 0; i < scratch.top.length; i++) {
-    if (wins(draws, s, i, threshold, scratch)) total += 1 / (scratch.winners[i] as number);
-  }
-  return total / scratch.top.length;
-}
-
-/** The tie of net-benefit.ts, written out for speed. */
-function wins(draws: Draws, s: number, i: number, threshold: number, scratch: Scratch): boolean {
-  const money = (draws.cost[s] as Float64Array)[i] as number;
-  const worth = threshold * ((draws.health[s] as Float64Array)[i] as number);
-  const short = (scratch.top[i] as number) - (worth - money);
-  if (short === 0 || short <= (scratch.slack[i] as number)) return true;
-  return short <= TIE * (Math.abs(worth) + Math.abs(money));
-}
-
-/** Fills `loss` for a strategy and gives its mean: 0 or more, as no draw beats the highest. */
-function fillLoss(draws: Draws, s: number, threshold: number, { top, loss }: Scratch): number {
+/** Fills a strategy's losses, counts it where it ties with the highest; gives its mean loss. */
+function fillLoss(draws: Draws, s: number, threshold: number, scratch: Scratch): number {
   const money = draws.cost[s] as Float64Array;
   const gain = draws.health[s] as Float64Array;
+  const loss = scratch.losses[s] as Float64Array;
+  const { top, slack, winners } = scratch;
+  let total = 0;
   for (let i = 0; i < top.length; i++) {
-    loss[i] = (top[i] as number) - (threshold * (gain[i] as number) - (money[i] as number));
+    const paid = money[i] as number;
+    const worth = threshold * (gain[i] as number);
+    const short = (top[i] as number) - (worth - paid);
+    // The tie of net-benefit.ts, written out for speed.
+    const ties = short <= (slack[i] as number) || short <= TIE * (Math.abs(worth) + Math.abs(paid));
+    if (ties) (winners[i] as number)++;
+    const counted = ties ? 0 : short;
+    loss[i] = counted;
+    total += counted;
   }
-  return Math.max(0, mean(loss));
+  return total / top.length;
+}
+
+function shareBest(loss: Float64Array, winners: Uint16Array): number {
+  let total = 0;
+  for (let i = 0; i < loss.length; i++) {
+    if (loss[i] === 0) total += 1 / (winners[i] as number);
+  }
+  return total / loss.length;
+}
+
+function shareTied(winners: Uint16Array): number {
+  let tied = 0;
+  for (let i = 0; i < winners.length; i++) {
+    if ((winners[i] as number) > 1) tied++;
+  }
+  return tied / winners.length;
 }
