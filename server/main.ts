@@ -4,7 +4,7 @@ import { fileURLToPath } from 'node:url';
 import { createApp } from './app.ts';
 import { type Config, readConfig } from './config.ts';
 import { type Database, openDatabase } from './db.ts';
-import type { Fault } from './fault.ts';
+import { startupWords } from './startup-words.ts';
 import { VERSION } from './version.ts';
 
 const DIST = fileURLToPath(new URL('../dist', import.meta.url));
@@ -51,21 +51,7 @@ function stop(server: Server, database: Database): void {
   server.closeIdleConnections();
 }
 
-const WORDS: Readonly<Record<string, (fault: Fault) => string>> = {
-  'config.invalid': ({ path, params }) =>
-    `The environment variable ${path[0]} cannot be "${params.value}". Change it or leave it unset.`,
-  'database.newer': () =>
-    'The data folder was written by a newer version of Steelyard. Start that version, or choose another folder with STEELYARD_DATA.',
-  'database.orphans': ({ params }) =>
-    `Bringing the database up to date would leave ${params.rows} rows of ${params.table} without their parents. Nothing was changed.`,
-  EADDRINUSE: () => 'The port is in use. Choose another one with PORT.',
-  EACCES: () =>
-    'The port or the data folder may not be used. Choose others with PORT, STEELYARD_DATA.',
-};
-
 function sayAndLeave(error: unknown): void {
-  const code = (error as { code?: unknown } | null)?.code;
-  const words = WORDS[String(code)];
-  console.error(words ? words(error as Fault) : error);
+  console.error(startupWords(error) ?? error);
   process.exit(1);
 }

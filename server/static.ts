@@ -1,5 +1,5 @@
-import { extname, join } from 'node:path';
-import express, { type RequestHandler, type Response } from 'express';
+import { join } from 'node:path';
+import express, { type Request, type RequestHandler, type Response } from 'express';
 
 const YEAR = 'public, max-age=31536000, immutable';
 /** Kept, but asked for anew each time: the page, the manifest, the service worker. */
@@ -25,15 +25,26 @@ export function staticFiles(dist: string): RequestHandler {
  */
 export function page(dist: string): RequestHandler {
   return (request, response, next) => {
-    const wantsPage =
-      (request.method === 'GET' || request.method === 'HEAD') &&
-      extname(request.path) === '' &&
-      !request.path.startsWith('/assets/') &&
-      request.accepts('html');
-    if (!wantsPage) return next();
+    if (!isAddress(request) || !request.accepts('html')) return next();
     response.setHeader('Cache-Control', REVALIDATE);
     response.sendFile('index.html', { root: dist, cacheControl: false }, (error) => {
       if (error) next(error);
     });
   };
+}
+
+/** No address of the app has a dot in its last part; what does is a file. */
+const ADDRESS = /^(?!\/assets\/).*\/[^./]*$/;
+
+function isAddress({ method, path }: Request): boolean {
+  return (method === 'GET' || method === 'HEAD') && ADDRESS.test(path) && isReadable(path);
+}
+
+function isReadable(path: string): boolean {
+  try {
+    decodeURIComponent(path);
+    return true;
+  } catch {
+    return false;
+  }
 }

@@ -11,6 +11,7 @@ const CHANCE_AND_TIME = new Set(['Math.random', 'Date.now', 'performance.now']);
 export function purityFindings(file: SourceFile): Finding[] {
   const found: Finding[] = [];
   const pure = file.path.startsWith('shared/') && !file.path.startsWith('shared/cli/');
+  const text = (node: { start: number; end: number }) => file.text.slice(node.start, node.end);
   const add = (code: string, detail: string, start: number) =>
     found.push({ code, path: file.path, line: lineOf(file.text, start), detail });
   const call = (callee: string, args: number, start: number) => {
@@ -19,13 +20,15 @@ export function purityFindings(file: SourceFile): Finding[] {
   };
   new Visitor({
     MemberExpression(node) {
-      const name = file.text.slice(node.start, node.end).replace(/\s/g, '');
+      const name = text(node).replace(/\s/g, '');
       if (pure && CHANCE_AND_TIME.has(name)) add('purity.clock', name, node.start);
     },
-    CallExpression: (node) =>
-      call(file.text.slice(node.callee.start, node.callee.end), node.arguments.length, node.start),
-    NewExpression: (node) =>
-      call(file.text.slice(node.callee.start, node.callee.end), node.arguments.length, node.start),
+    CallExpression(node) {
+      call(text(node.callee), node.arguments.length, node.start);
+    },
+    NewExpression(node) {
+      call(text(node.callee), node.arguments.length, node.start);
+    },
   }).visit(parseSource(file).program);
   return found;
 }
