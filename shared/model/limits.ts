@@ -6,6 +6,8 @@ export const MAX_BYTES = 10_000_000;
 export const MAX_DEPTH = 64;
 /** Values of any type in one document: above what MAX_BYTES of JSON can hold. */
 export const MAX_VALUES = 6_000_000;
+/** Keys of one object: far above any that the format knows. */
+export const MAX_KEYS = 10_000;
 /** Issues that are listed one by one. */
 export const MAX_ISSUES = 100;
 /** Cycles that a model may run. */

@@ -1,5 +1,5 @@
 import { error, type Issue, type IssueParams, type Path } from './issue.ts';
-import { MAX_DEPTH, MAX_ISSUES, MAX_VALUES } from './limits.ts';
+import { MAX_DEPTH, MAX_ISSUES, MAX_KEYS, MAX_VALUES } from './limits.ts';
 import { HOSTILE_KEYS } from './names.ts';
 
 type Key = string | number;
@@ -45,10 +45,15 @@ class Walk {
       for (let i = 0; i < value.length && !this.done; i += 1) this.part(value[i], i, container);
       return;
     }
-    for (const key of Object.keys(value)) {
+    const keys = Object.keys(value);
+    if (keys.length > MAX_KEYS) {
+      this.add('document.tooManyKeys', container.key, container.parent, { maximum: MAX_KEYS });
+      return;
+    }
+    for (const key of keys) {
       if (this.done) return;
       if (HOSTILE_KEYS.has(key)) this.add('document.hostileKey', key, container, { key });
-      else if (!isWellFormed(key)) this.add('document.brokenText', '', container);
+      else if (!isWellFormed(key)) this.add('document.brokenText', container.key, container.parent);
       else this.part(keyed[key], key, container);
     }
   }
@@ -87,8 +92,9 @@ class Walk {
 function isPlain(value: object): boolean {
   if (Array.isArray(value)) return true;
   const prototype: object | null = Object.getPrototypeOf(value);
-  // Another realm's Object.prototype (a worker, a test's sandbox) is plain too.
-  return prototype === null || Object.getPrototypeOf(prototype) === null;
+  if (prototype === Object.prototype || prototype === null) return true;
+  // Another realm's Object.prototype (a test's sandbox) is plain too.
+  return Object.getPrototypeOf(prototype) === null;
 }
 
 const LONE_SURROGATE = /\p{Surrogate}/u;

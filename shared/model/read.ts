@@ -54,7 +54,11 @@ export function checkDocument(
   if (shape.length > 0) return refused(shape);
   const parsed = documentSchema.safeParse(current.value);
   if (!parsed.success) {
-    return refused(parsed.error.issues.map((issue) => schemaIssue(issue, valueAt(current.value, issue.path), issue.path as Path)));
+    return refused(
+      parsed.error.issues.map((issue) =>
+        schemaIssue(issue, valueAt(current.value, issue.path), issue.path as Path),
+      ),
+    );
   }
   const issues = capped(checkReferences(parsed.data));
   if (hasErrors(issues)) return { document: null, draft: parsed.data, issues };

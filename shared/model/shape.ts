@@ -38,7 +38,7 @@ class Walk {
       case 'object':
         return this.object(def, value, path);
       case 'array':
-        return this.array(schema, def, value, path);
+        return this.array(def, value, path);
       case 'record':
         return this.record(def, value, path);
       case 'union':
@@ -60,13 +60,10 @@ class Walk {
     }
   }
 
-  private array(schema: Schema, def: z.core.$ZodArrayDef, value: unknown, path: Path): void {
+  private array(def: z.core.$ZodArrayDef, value: unknown, path: Path): void {
     if (!Array.isArray(value)) return this.add(typeIssue('array', value, path));
-    const { minimum, maximum } = schema._zod.bag as { minimum?: number; maximum?: number };
-    if (value.length < (minimum ?? 0) || value.length > (maximum ?? Number.POSITIVE_INFINITY)) {
-      // Parsed as a list of anything: the length alone is at fault.
-      return this.length(minimum, maximum, value, path);
-    }
+    const fault = lengthFault(def, value.length);
+    if (fault) return this.add(schemaIssue(fault, value, path));
     const plainNumbers = isPlainNumber(def.element);
     for (let i = 0; i < value.length && !this.full; i += 1) {
       if (plainNumbers && typeof value[i] === 'number') continue;
@@ -74,25 +71,12 @@ class Walk {
     }
   }
 
-  private length(
-    minimum: number | undefined,
-    maximum: number | undefined,
-    value: readonly unknown[],
-    path: Path,
-  ): void {
-    const tooFew = minimum !== undefined && value.length < minimum;
-    const issue = tooFew
-      ? { code: 'too_small', origin: 'array', minimum, path: [], message: '' }
-      : { code: 'too_big', origin: 'array', maximum, path: [], message: '' };
-    this.add(schemaIssue(issue as z.core.$ZodIssue, value, path));
-  }
-
   private record(def: z.core.$ZodRecordDef, value: unknown, path: Path): void {
     if (!isKeyed(value)) return this.add(typeIssue('object', value, path));
     for (const key of Object.keys(value)) {
       if (this.full) return;
       if (!accepts(def.keyType, key)) this.add(keyIssue([...path, key]));
-      this.visit(def.valueType, value[key], [...path, key]);
+      else this.visit(def.valueType, value[key], [...path, key]);
     }
   }
 
@@ -105,11 +89,7 @@ class Walk {
     this.add(typeIssue(def.options.map(jsonType).join(', '), value, path));
   }
 
-  private discriminated(
-    def: z.core.$ZodDiscriminatedUnionDef,
-    value: unknown,
-    path: Path,
-  ): void {
+  private discriminated(def: z.core.$ZodDiscriminatedUnionDef, value: unknown, path: Path): void {
     if (!isKeyed(value)) return this.add(typeIssue('object', value, path));
     const tag = own(value, def.discriminator);
     const meant = def.options.find((option) => tags(option, def.discriminator).has(tag));
@@ -134,6 +114,21 @@ function own(value: Keyed, key: string): unknown {
 
 function accepts(schema: Schema, value: unknown): boolean {
   return (schema as z.ZodType).safeParse(value).success;
+}
+
+/** What is wrong with a list's length, as zod would say it; the items are left alone then. */
+function lengthFault(def: z.core.$ZodArrayDef, length: number): z.core.$ZodIssue | null {
+  for (const check of def.checks ?? []) {
+    const { def: bound } = (check as z.core.$ZodChecks)._zod;
+    const origin = 'array';
+    if (bound.check === 'min_length' && length < bound.minimum) {
+      return { code: 'too_small', origin, minimum: bound.minimum, path: [], message: '' };
+    }
+    if (bound.check === 'max_length' && length > bound.maximum) {
+      return { code: 'too_big', origin, maximum: bound.maximum, path: [], message: '' };
+    }
+  }
+  return null;
 }
 
 /** Values of the discriminating field that an alternative stands for. */

@@ -19,7 +19,11 @@ export function checkGroups(lookups: Lookups): Issue[] {
 }
 
 /** A parameter drawn in a group points to one that draws, and that lists it. */
-function checkMembership({ groups }: Lookups, { id, distribution }: Parameter, path: Path): Issue[] {
+function checkMembership(
+  { groups }: Lookups,
+  { id, distribution }: Parameter,
+  path: Path,
+): Issue[] {
   if (distribution.type !== 'inGroup') return [];
   const group = groups.get(distribution.group);
   if (!group) return [error('groups.unknown', path, { id: distribution.group })];
@@ -90,7 +94,9 @@ function checkMatrix(matrix: Matrix, size: number, path: Path): Issue[] {
   if (wrong.length > 0) return wrong;
   return matrix.flatMap((row, i) => {
     const j = row.findIndex((value, at) => !mirrors(value, matrix[at]![i]!));
-    return j < 0 ? [] : [error('groups.notSymmetric', [...path, i, j], { row: i + 1, column: j + 1 })];
+    return j < 0
+      ? []
+      : [error('groups.notSymmetric', [...path, i, j], { row: i + 1, column: j + 1 })];
   });
 }
 

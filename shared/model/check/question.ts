@@ -5,13 +5,19 @@ import { MAX_CYCLES } from '../limits.ts';
 import type { Lookups } from './lookups.ts';
 import { checkStrategy } from './references-of.ts';
 
-/** The comparator is a strategy, and the clock can be run. */
+/** The comparator is a strategy, the threshold in force is listed, and the clock can be run. */
 export function checkQuestion(lookups: Lookups): Issue[] {
   const { question } = lookups.document;
   return [
     ...checkStrategy(lookups, question.comparator, ['question', 'comparator']),
+    ...checkThresholdInForce(question),
     ...checkClock(question, ['question', 'horizon']),
   ];
+}
+
+function checkThresholdInForce({ thresholds, thresholdInForce: id }: Question): Issue[] {
+  if (id === undefined || thresholds.some((threshold) => threshold.id === id)) return [];
+  return [error('question.unknownThreshold', ['question', 'thresholdInForce'], { id })];
 }
 
 /**

@@ -44,7 +44,8 @@ function checkCells(lookups: Lookups, row: Row, path: Path): Issue[] {
       ...checkStrategyFormula(lookups, formula, [...at, 'formula'], row.strategies),
     ];
     if (to === rest.state) issues.push(error(rest.code, [...at, 'to'], { state: to }));
-    if (seen.has(to)) issues.push(error('movements.destinationTwice', [...at, 'to'], { state: to }));
+    if (seen.has(to))
+      issues.push(error('movements.destinationTwice', [...at, 'to'], { state: to }));
     seen.add(to);
     return issues;
   });

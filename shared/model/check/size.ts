@@ -7,7 +7,6 @@ import { expandedStates } from './states.ts';
 /** One run's work, strategies x profiles x cycles x expanded states, is within MAX_WORK. */
 export function checkSize({ document }: Lookups): Issue[] {
   const { strategies, profiles, question, states } = document;
-  const work =
-    strategies.length * profiles.length * cycleCount(question) * expandedStates(states);
+  const work = strategies.length * profiles.length * cycleCount(question) * expandedStates(states);
   return work <= MAX_WORK ? [] : [error('document.tooMuchWork', [], { work, maximum: MAX_WORK })];
 }

@@ -23,5 +23,7 @@ function checkTable({ keys, values }: Table, path: Path): Issue[] {
 function checkRising(points: readonly number[], path: Path): Issue[] {
   const at = points.findIndex((point, index) => index > 0 && point <= points[index - 1]!);
   if (at < 0) return [];
-  return [error('tables.keysNotRising', [...path, at], { got: points[at]!, before: points[at - 1]! })];
+  return [
+    error('tables.keysNotRising', [...path, at], { got: points[at]!, before: points[at - 1]! }),
+  ];
 }
