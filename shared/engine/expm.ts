@@ -99,6 +99,7 @@ export class Exponential {
     term.set(next);
   }
 
+  /** Rows are brought back to a sum of 1 each time: squaring would double what rounding left. */
   private square(): void {
     const { size, result, work } = this;
     work.fill(0);
@@ -111,7 +112,11 @@ export class Exponential {
         }
       }
     }
-    result.set(work);
+    for (let i = 0; i < size; i++) {
+      const row = work.subarray(i * size, (i + 1) * size);
+      const sum = row.reduce((total, p) => total + p, 0);
+      for (let j = 0; j < size; j++) result[i * size + j] = row[j]! / sum;
+    }
   }
 }
 
