@@ -59,5 +59,4 @@ export const competing = (rate: number, total: number, years: number): number =>
  * Probability of the event between two times, given none before the first, from
  * survival at each: 1 - then / now. Where nobody is left (`now` 0) it is 1.
  */
-export const eventBy = (now: number, then: number): number =>
-  now === 0 ? 1 : (now - then) / now;
+export const eventBy = (now: number, then: number): number => (now === 0 ? 1 : (now - then) / now);

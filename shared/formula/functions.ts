@@ -3,8 +3,9 @@
  * in help and completion, what kind it should be, and the kind of the result.
  * Operators are here too, by their words; their kinds are worked out in kinds.ts.
  */
-import { OPERATORS, PREFIX_OPERATORS } from './expr.ts';
+
 import type { Kind } from '../model/kinds.ts';
+import { OPERATORS, PREFIX_OPERATORS } from './expr.ts';
 
 /** A function's argument. `number` asks for nothing in particular. */
 export interface Param {
@@ -110,9 +111,7 @@ export const FUNCTIONS: ReadonlyMap<string, FormulaFunction> = new Map(
 );
 
 /** Names that an author may call: no operators. */
-export const CALLABLE: readonly string[] = all
-  .filter((fn) => !fn.isOperator)
-  .map((fn) => fn.name);
+export const CALLABLE: readonly string[] = all.filter((fn) => !fn.isOperator).map((fn) => fn.name);
 
 /** The argument at a position, the last one repeating. */
 export function paramAt(fn: FormulaFunction, index: number): Param | undefined {

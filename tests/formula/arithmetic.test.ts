@@ -9,12 +9,17 @@ it('computes with the operators', () => {
 });
 
 it('answers comparisons and logic with 1 and 0, and takes anything but 0 as true', () => {
-  expect([operators.less(1, 2), operators.less(2, 2), operators.less_equal(2, 2)]).toEqual([1, 0, 1]);
+  expect([operators.less(1, 2), operators.less(2, 2), operators.less_equal(2, 2)]).toEqual([
+    1, 0, 1,
+  ]);
   expect([operators.greater(3, 2), operators.greater_equal(1, 2)]).toEqual([1, 0]);
   expect([operators.equal(2, 2), operators.not_equal(2, 2)]).toEqual([1, 0]);
-  expect([operators.and(0.5, -1), operators.and(1, 0), operators.or(0, 2), operators.or(0, 0)]).toEqual(
-    [1, 0, 1, 0],
-  );
+  expect([
+    operators.and(0.5, -1),
+    operators.and(1, 0),
+    operators.or(0, 2),
+    operators.or(0, 0),
+  ]).toEqual([1, 0, 1, 0]);
   expect([operators.not(0), operators.not(0.1)]).toEqual([1, 0]);
 });
 

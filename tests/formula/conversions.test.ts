@@ -4,7 +4,8 @@ import * as conversions from '../../shared/formula/conversions.ts';
 import rates from '../golden/rates.json' with { type: 'json' };
 
 // tests/golden/rates.json: closed forms in R 4.2.2, absolute tolerance 1e-12 (its README).
-const close = (got: number, want: number) => expect(Math.abs(got - want)).toBeLessThanOrEqual(1e-12);
+const close = (got: number, want: number) =>
+  expect(Math.abs(got - want)).toBeLessThanOrEqual(1e-12);
 const golden = rates.conversions;
 
 describe('against the reference set', () => {
