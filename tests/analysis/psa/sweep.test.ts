@@ -186,6 +186,13 @@ describe('properties', () => {
     ]);
   });
 
+  it('takes for a tie what only rounding parts, whichever of the two comes out higher', () => {
+    const cost = [Float64Array.of(0, 0), Float64Array.of(0.1 + 0.2, 0.3)];
+    const health = [Float64Array.of(0, 0), Float64Array.of(0.3, 0.1 + 0.2)];
+    const [point] = sweep({ strategies: ['a', 'b'], cost, health }, [1]).points;
+    expect(point).toMatchObject({ probability: [0.5, 0.5], expectedLoss: [0, 0], tiedShare: 1 });
+  });
+
   it('has no standard error for one draw', () => {
     expect(sweep(twoNormal(1, 1, 1, 1), [1]).points[0]?.lossSe).toBeNull();
   });
