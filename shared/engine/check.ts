@@ -3,11 +3,10 @@ import { checkFormulas } from '../formula/check.ts';
 import type { ModelDocument } from '../model/document.ts';
 import { hasErrors, type Issue } from '../model/issue.ts';
 import { checkReferences } from '../model/references.ts';
-import { checkDistributions } from './distributions/check.ts';
 
 /** References first: formulas and distributions are only read where those hold. */
 export function checkModel(document: ModelDocument): Issue[] {
   const references = checkReferences(document);
   if (hasErrors(references)) return references;
-  return [...references, ...checkFormulas(document), ...checkDistributions(document)];
+  return [...references, ...checkFormulas(document)];
 }

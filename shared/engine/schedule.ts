@@ -187,7 +187,24 @@ class Scheduler {
     const own = [...nodes].filter((node) => this.stages[node] === name).sort((a, b) => a - b);
     const kept = name === 'tape' || name === 'profileTape';
     for (const node of own) this.layout.place(node, kept);
-    return { instructions: own.map((node) => this.layout.instruction(node)), checks: this.checksOf(own) };
+    const leaves = [...nodes].filter((node) => this.leafStage(node) === name);
+    return {
+      instructions: own.filter((node) => this.isComputed(node)).map((node) => this.layout.instruction(node)),
+      checks: this.checksOf([...leaves, ...own]),
+    };
+  }
+
+  /** Entries lie within their exponential: nothing is left to compute. */
+  private isComputed(node: NodeId): boolean {
+    return this.graph.node(node).operation.op !== 'entry';
+  }
+
+  /** The stage that a leaf is looked at in: the first in which it is set. */
+  private leafStage(node: NodeId): StageName | null {
+    if (this.stages[node] !== 'leaf') return null;
+    const { varies } = this.graph.node(node);
+    if (varies === VARIES.cycle) return 'tape';
+    return varies === VARIES.profile ? 'profile' : 'once';
   }
 
   /** Each quantity is looked at once, wherever it is computed. */

@@ -90,7 +90,7 @@ export class Simulator {
   }
 
   private runTape(stage: Stage, draws: number, problems: ProblemLog): void {
-    if (stage.instructions.length === 0) return;
+    if (stage.instructions.length + stage.checks.length === 0) return;
     for (let cycle = 0; cycle < this.model.cycles; cycle++) {
       this.setClocks(cycle);
       this.runStage(stage, cycle, draws, problems);
