@@ -1,0 +1,177 @@
+/**
+ * The answer at the threshold in force, on top of every step: which strategy is best, what
+ * it is worth, how sure that is, and what knowing more would be worth.
+ */
+import type { ReactNode } from 'react';
+import { useTranslation } from 'react-i18next';
+import { Figure } from '../../components/figure.tsx';
+import {
+  formatLargeMoney,
+  formatMoney,
+  formatNumber,
+  formatProbability,
+} from '../../i18n/format.ts';
+import type { Answer, Chances, Estimate } from '../../store/answer.ts';
+import type { DrawsRun } from '../../store/draws.ts';
+import type { Language } from '../../store/settings.ts';
+import { Pending } from './pending.tsx';
+
+export interface AnswerStripProps {
+  readonly now: Answer;
+  /** The answer before the last movement of the poise; null where nothing has moved. */
+  readonly was: Answer | null;
+  /** Strategies' names by id. */
+  readonly names: ReadonlyMap<string, string>;
+  readonly comparator: string;
+  /** The threshold in words, such as "KM 1,500 per QALY". */
+  readonly threshold: string;
+  readonly symbol: string;
+  /** Whom the value for the population is for; absent where the question does not say. */
+  readonly beneficiaries: string | undefined;
+  readonly run: DrawsRun;
+  readonly language: Language;
+}
+
+export function AnswerStrip(props: AnswerStripProps) {
+  const { t } = useTranslation();
+  return (
+    <section
+      aria-label={t('strip.label')}
+      className="grid grid-cols-2 border-b border-rule md:grid-cols-[1.5fr_1fr_1fr_1fr]"
+    >
+      <BestCell {...props} />
+      <NetBenefitCell {...props} />
+      <ProbabilityCell {...props} />
+      <EvpiCell {...props} />
+    </section>
+  );
+}
+
+function BestCell({ now, was, names, threshold }: AnswerStripProps) {
+  const { t } = useTranslation();
+  const changed = was && was.best !== now.best ? names.get(was.best) : null;
+  return (
+    <Cell label={t('strip.bestAt', { threshold })} was={changed}>
+      <span data-figure="best">{names.get(now.best)}</span>
+      {now.tied.length > 0 && (
+        <Small>
+          {t('strip.tied', { strategies: now.tied.map((id) => names.get(id)).join(', ') })}
+        </Small>
+      )}
+    </Cell>
+  );
+}
+
+function NetBenefitCell({ now, was, names, comparator, symbol, language }: AnswerStripProps) {
+  const { t } = useTranslation();
+  const words = ({ netBenefit }: Answer) =>
+    formatMoney(netBenefit, symbol, language, { signed: true });
+  const text = words(now);
+  const before = was && words(was) !== text ? words(was) : null;
+  const isComparator = now.best === comparator;
+  return (
+    <Cell label={t('strip.netBenefit', { comparator: names.get(comparator) })} was={before}>
+      <Figure name="netBenefit" value={now.netBenefit}>
+        {text}
+      </Figure>
+      {isComparator && <Small>{t('strip.isComparator')}</Small>}
+    </Cell>
+  );
+}
+
+function ProbabilityCell({ now, was, run, language }: AnswerStripProps) {
+  const { t } = useTranslation();
+  const words = ({ probabilityBest }: Chances) =>
+    formatProbability(probabilityBest.value, language);
+  if (!now.chances) {
+    return (
+      <Cell label={t('strip.probability')}>
+        <Pending run={run} language={language} />
+      </Cell>
+    );
+  }
+  const { probabilityBest } = now.chances;
+  const before =
+    was?.chances && words(was.chances) !== words(now.chances) ? words(was.chances) : null;
+  return (
+    <Cell label={t('strip.probability')} was={before}>
+      <Figure name="probabilityBest" value={probabilityBest.value}>
+        {words(now.chances)}
+      </Figure>
+      <MonteCarlo estimate={probabilityBest} decimals={2} language={language} />
+    </Cell>
+  );
+}
+
+function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProps) {
+  const { t } = useTranslation();
+  const words = ({ evpi }: Chances) => formatMoney(evpi.value, symbol, language);
+  if (!now.chances) {
+    return (
+      <Cell label={t('strip.evpi')}>
+        <span className="text-mute">{t('strip.noNumber')}</span>
+      </Cell>
+    );
+  }
+  const { evpi, populationEvpi } = now.chances;
+  const before =
+    was?.chances && words(was.chances) !== words(now.chances) ? words(was.chances) : null;
+  return (
+    <Cell label={t('strip.evpi')} was={before}>
+      <Figure name="evpi" value={evpi.value}>
+        {words(now.chances)}
+      </Figure>
+      <MonteCarlo estimate={evpi} decimals={decimalsFor(evpi)} language={language} />
+      {populationEvpi && (
+        <Small>
+          <Figure name="populationEvpi" value={populationEvpi.value}>
+            {t('strip.population', {
+              amount: formatLargeMoney(populationEvpi.value, symbol, language),
+            })}
+          </Figure>
+          <span className="sr-only"> ({beneficiaries})</span>
+        </Small>
+      )}
+    </Cell>
+  );
+}
+
+/** The error of a run of so many draws: small, and where there is room. */
+function MonteCarlo(props: { estimate: Estimate; decimals: number; language: Language }) {
+  const { t } = useTranslation();
+  const { standardError } = props.estimate;
+  if (standardError === null || standardError === 0) return null;
+  const smallest = 10 ** -props.decimals;
+  const shown = formatNumber(Math.max(standardError, smallest), props.language, {
+    decimals: props.decimals,
+  });
+  return (
+    <span
+      className="ml-2 text-sm font-normal whitespace-nowrap text-mute"
+      title={t('strip.monteCarlo')}
+    >
+      ± {shown}
+    </span>
+  );
+}
+
+/** As many decimals as the first figure of the error takes. */
+function decimalsFor({ standardError }: Estimate): number {
+  if (!standardError) return 0;
+  return Math.min(4, Math.max(0, -Math.floor(Math.log10(standardError))));
+}
+
+function Cell(props: { label: string; was?: string | null | undefined; children: ReactNode }) {
+  const { t } = useTranslation();
+  return (
+    <div className="min-w-0 border-rule py-2.5 pr-3 even:border-l even:pl-3 md:pr-4 md:not-first:border-l md:not-first:pl-4 max-md:nth-3:border-t max-md:nth-4:border-t">
+      <p className="text-sm text-mute">{props.label}</p>
+      <p className="text-lg leading-snug font-bold sm:text-xl">{props.children}</p>
+      {props.was && <p className="text-sm text-brass">{t('strip.was', { before: props.was })}</p>}
+    </div>
+  );
+}
+
+function Small({ children }: { children: ReactNode }) {
+  return <span className="block text-sm font-normal text-mute">{children}</span>;
+}

@@ -1,0 +1,213 @@
+/** Full incremental analysis: a table where there is room, cards on a phone. */
+import type { ReactNode } from 'react';
+import { useTranslation } from 'react-i18next';
+import type { IncrementalRow } from '../../../shared/analysis/incremental.ts';
+import { Figure } from '../../components/figure.tsx';
+import { Swatch } from '../../components/strategy-mark.tsx';
+import { formatAmount, formatNumber, formatOutcome } from '../../i18n/format.ts';
+import type { OutcomeWords } from '../../i18n/outcome-words.ts';
+import type { Language } from '../../store/settings.ts';
+
+export interface IncrementalTableProps {
+  /** In order of cost. */
+  readonly rows: readonly IncrementalRow[];
+  /** Primary outcome by strategy, in its own direction. */
+  readonly outcomes: ReadonlyMap<string, number>;
+  /** Net monetary benefit by strategy at the threshold in force. */
+  readonly nmb: ReadonlyMap<string, number>;
+  /** Strategies' names by id, in document order. */
+  readonly names: ReadonlyMap<string, string>;
+  readonly best: string;
+  readonly symbol: string;
+  readonly outcome: OutcomeWords;
+  readonly language: Language;
+}
+
+export function IncrementalTable(props: IncrementalTableProps) {
+  return (
+    <>
+      <Table {...props} />
+      <Cards {...props} />
+      <Reasons {...props} />
+    </>
+  );
+}
+
+function Table(props: IncrementalTableProps) {
+  const { t } = useTranslation();
+  const { rows, symbol, outcome } = props;
+  return (
+    <table className="w-full border-collapse text-right max-sm:hidden">
+      <thead className="text-sm text-mute">
+        <tr>
+          <Head first>{t('table.strategy')}</Head>
+          <Head unit={symbol}>{t('table.cost')}</Head>
+          <Head>{outcome.plural}</Head>
+          <Head unit={t('table.per', { symbol, unit: outcome.per })}>{t('table.icer')}</Head>
+          <Head unit={symbol}>{t('table.nmb')}</Head>
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map((row) => (
+          <tr
+            key={row.id}
+            className={row.id === props.best ? 'font-bold' : ''}
+            data-strategy={row.id}
+          >
+            <th scope="row" className="border-b border-rule py-2.5 pr-2 text-left font-[inherit]">
+              <Name id={row.id} names={props.names} />
+            </th>
+            <Amount>
+              <Cost {...props} row={row} />
+            </Amount>
+            <Amount>
+              <Outcome {...props} row={row} />
+            </Amount>
+            <Amount>
+              <Icer {...props} row={row} />
+            </Amount>
+            <Amount>
+              <NetBenefit {...props} row={row} />
+            </Amount>
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}
+
+function Head(props: { children: string; unit?: string; first?: boolean }) {
+  const side = props.first ? 'text-left' : 'pl-3 text-right';
+  return (
+    <th scope="col" className={`border-b border-ink pb-1.5 align-bottom font-normal ${side}`}>
+      {props.children}
+      {props.unit && <span className="block">{props.unit}</span>}
+    </th>
+  );
+}
+
+function Amount({ children }: { children: ReactNode }) {
+  return <td className="border-b border-rule py-2.5 pl-3 whitespace-nowrap">{children}</td>;
+}
+
+function Cards(props: IncrementalTableProps) {
+  const { t } = useTranslation();
+  const { rows, symbol, outcome } = props;
+  return (
+    <ul className="border-t border-ink sm:hidden">
+      {rows.map((row) => (
+        <li key={row.id} className="border-b border-rule py-3">
+          <p className={row.id === props.best ? 'font-bold' : ''}>
+            <Name id={row.id} names={props.names} />
+          </p>
+          <dl className="mt-1 grid grid-cols-[1fr_auto] gap-x-3">
+            <Line term={t('table.costIn', { symbol })}>
+              <Cost {...props} row={row} />
+            </Line>
+            <Line term={outcome.plural}>
+              <Outcome {...props} row={row} />
+            </Line>
+            <Line term={t('table.icerIn', { symbol, unit: outcome.per })}>
+              <Icer {...props} row={row} />
+            </Line>
+            <Line term={t('table.nmbIn', { symbol })}>
+              <NetBenefit {...props} row={row} />
+            </Line>
+          </dl>
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+function Line({ term, children }: { term: string; children: ReactNode }) {
+  return (
+    <>
+      <dt className="text-mute">{term}</dt>
+      <dd className="text-right">{children}</dd>
+    </>
+  );
+}
+
+function Name({ id, names }: { id: string; names: ReadonlyMap<string, string> }) {
+  const index = [...names.keys()].indexOf(id);
+  return (
+    <span className="inline-flex items-center gap-2">
+      <Swatch index={index} />
+      {names.get(id)}
+    </span>
+  );
+}
+
+type CellProps = IncrementalTableProps & { readonly row: IncrementalRow };
+
+function Cost({ row, rows, language }: CellProps) {
+  const decimals = columnDecimals(rows.map(({ cost }) => cost));
+  return (
+    <Figure name="cost" value={row.cost}>
+      {formatNumber(row.cost, language, { decimals })}
+    </Figure>
+  );
+}
+
+function Outcome({ row, outcomes, language }: CellProps) {
+  const value = outcomes.get(row.id) ?? 0;
+  return (
+    <Figure name="outcome" value={value}>
+      {formatOutcome(value, language)}
+    </Figure>
+  );
+}
+
+/** A ratio where there is one; otherwise the word for why there is none. */
+function Icer({ row, names, language }: CellProps) {
+  const { t } = useTranslation();
+  if (row.icer !== null) {
+    return (
+      <Figure name="icer" value={row.icer}>
+        {formatAmount(row.icer, language)}
+      </Figure>
+    );
+  }
+  const other = row.tiedWith === null ? '' : names.get(row.tiedWith);
+  return (
+    <span className="text-sm font-normal whitespace-normal text-mute">
+      {t(`table.noIcer.${row.noIcer ?? 'reference'}`, { other })}
+    </span>
+  );
+}
+
+function NetBenefit({ row, nmb, language }: CellProps) {
+  const value = nmb.get(row.id) ?? 0;
+  const decimals = columnDecimals([...nmb.values()]);
+  return (
+    <Figure name="nmb" value={value}>
+      {formatNumber(value, language, { decimals })}
+    </Figure>
+  );
+}
+
+/** One number of decimals for the whole column, so that its figures line up. */
+function columnDecimals(values: readonly number[]): number {
+  const largest = Math.max(...values.map(Math.abs));
+  return largest >= 100 ? 0 : 2;
+}
+
+/** Who rules out whom, in a sentence each. */
+function Reasons({ rows, names }: IncrementalTableProps) {
+  const { t } = useTranslation();
+  const sentences = rows.flatMap((row) => {
+    const strategy = names.get(row.id);
+    if (row.status === 'dominated' && row.dominatedBy !== null) {
+      return [t('table.dominatedBy', { strategy, other: names.get(row.dominatedBy) })];
+    }
+    if (row.extendedlyDominatedBy === null) return [];
+    const [cheaper, dearer] = row.extendedlyDominatedBy.map((id) => names.get(id));
+    return [t('table.extendedlyDominatedBy', { strategy, cheaper, dearer })];
+  });
+  return sentences.map((sentence) => (
+    <p key={sentence} className="mt-2 text-sm text-mute">
+      {sentence}
+    </p>
+  ));
+}

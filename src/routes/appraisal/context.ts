@@ -1,0 +1,37 @@
+/** What every step of an appraisal can see. */
+import { useOutletContext } from 'react-router-dom';
+import type { ModelDocument } from '../../../shared/model/document.ts';
+import type { Issue } from '../../../shared/model/issue.ts';
+import type { Move } from '../../components/move.ts';
+import type { OutcomeWords } from '../../i18n/outcome-words.ts';
+import type { Answer, Comparison } from '../../store/answer.ts';
+import type { DrawsRun } from '../../store/draws.ts';
+import type { Language } from '../../store/settings.ts';
+
+export interface AppraisalContext {
+  readonly slug: string;
+  /** Null where what was opened is no sound document: `issues` say why. */
+  readonly document: ModelDocument | null;
+  /** What is wrong with the model, or was found on running it. */
+  readonly issues: readonly Issue[];
+  readonly result: Result | null;
+  readonly language: Language;
+}
+
+/** There only while the model is whole. */
+export interface Result {
+  readonly document: ModelDocument;
+  readonly comparison: Comparison;
+  readonly now: Answer;
+  readonly run: DrawsRun;
+  readonly move: (move: Move) => void;
+  /** Strategies' names by id, in document order. */
+  readonly names: ReadonlyMap<string, string>;
+  readonly outcome: OutcomeWords;
+  /** A threshold in words, such as "KM 1,500 per QALY". */
+  readonly thresholdWords: (threshold: number) => string;
+}
+
+export function useAppraisalContext(): AppraisalContext {
+  return useOutletContext<AppraisalContext>();
+}

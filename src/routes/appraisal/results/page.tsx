@@ -1,0 +1,113 @@
+import { useTranslation } from 'react-i18next';
+import { toHealth } from '../../../../shared/analysis/direction.ts';
+import { frontierSegments } from '../../../../shared/analysis/frontier-segments.ts';
+import { frontierRows } from '../../../../shared/analysis/incremental.ts';
+import { IssueList } from '../../../components/issue-list.tsx';
+import { usePageTitle } from '../../../components/page-title.ts';
+import { Frontier } from '../../../features/frontier/frontier.tsx';
+import { IncrementalTable } from '../../../features/incremental/incremental-table.tsx';
+import { type AppraisalContext, type Result, useAppraisalContext } from '../context.ts';
+import { findingWords } from './finding-words.ts';
+import { Weighing } from './weighing.tsx';
+
+export function Component() {
+  const { t } = useTranslation();
+  const context = useAppraisalContext();
+  usePageTitle(t('steps.results'), context.document?.question.title ?? '');
+  return context.result ? (
+    <Results {...context} result={context.result} />
+  ) : (
+    <NoResults {...context} />
+  );
+}
+
+/** Nothing to show yet, or nothing that may be shown: the strip says which. */
+function NoResults({ issues, document }: AppraisalContext) {
+  const { t } = useTranslation();
+  const errors = issues.filter(({ severity }) => severity === 'error');
+  if (errors.length === 0) return <h1 className="mt-7 text-2xl">{t('steps.results')}</h1>;
+  return (
+    <>
+      <h1 className="mt-7 text-2xl">{t('broken.title')}</h1>
+      <p className="mt-1 mb-4 max-w-prose text-mute">{t('broken.body')}</p>
+      <IssueList issues={errors} document={document} />
+    </>
+  );
+}
+
+function Results({ slug, result, issues, language }: AppraisalContext & { result: Result }) {
+  const { t } = useTranslation();
+  const { document, comparison, now, names, outcome, thresholdWords } = result;
+  const { symbol } = document.question.currency;
+  const { direction } = document.question.outcome;
+  const segments = frontierSegments(comparison.rows, Number.POSITIVE_INFINITY);
+  const frontier = new Set(frontierRows(comparison.rows).map(({ id }) => id));
+  const order = document.strategies.map(({ id }) => id);
+  // Turning twice gives the outcome back in its own direction.
+  const outcomes = new Map(
+    comparison.rows.map(({ id, health }) => [id, toHealth(health, direction)]),
+  );
+  return (
+    <>
+      <h1 className="mt-7 max-w-[36em] text-2xl leading-tight sm:text-[1.65rem]">
+        {findingWords(comparison.rows, now.best, { t, names, thresholdWords, symbol, language })}
+      </h1>
+      <Weighing result={result} language={language} />
+      <div className="mt-9 grid gap-10 min-[1120px]:grid-cols-[1.25fr_1fr]">
+        <section aria-labelledby="incremental-title" className="min-w-0">
+          <h2 id="incremental-title" className="mb-2.5 text-lg">
+            {segments.length > 1 ? t('table.title') : t('table.titleAlone')}
+          </h2>
+          <IncrementalTable
+            rows={comparison.rows}
+            outcomes={outcomes}
+            nmb={now.nmb}
+            names={names}
+            best={now.best}
+            symbol={symbol}
+            outcome={outcome}
+            language={language}
+          />
+          <p className="mt-2 text-sm text-mute">
+            {t('table.note', { threshold: thresholdWords(now.threshold) })}
+          </p>
+        </section>
+        <Frontier
+          points={comparison.rows.map(({ id, cost }) => ({
+            id,
+            name: names.get(id) ?? id,
+            index: order.indexOf(id),
+            cost,
+            outcome: outcomes.get(id) ?? 0,
+            onFrontier: frontier.has(id),
+          }))}
+          fewerIsBetter={direction === 'fewerIsBetter'}
+          symbol={symbol}
+          unit={outcome.plural}
+          fileName={slug}
+          language={language}
+        />
+      </div>
+      <Notes result={result} issues={issues} />
+    </>
+  );
+}
+
+/** What the reader should know of the runs: warnings, and where the means say otherwise. */
+function Notes({ result, issues }: { result: Result; issues: AppraisalContext['issues'] }) {
+  const { t } = useTranslation();
+  const { now, run, names, document } = result;
+  const problems = run.state.status === 'done' ? run.state.problems : [];
+  const all = [...issues, ...problems];
+  const onMean = now.chances?.bestOnMean;
+  if (all.length === 0 && !onMean) return null;
+  return (
+    <section aria-labelledby="notes-title" className="mt-9">
+      <h2 id="notes-title" className="mb-2 text-lg">
+        {t('notes.title')}
+      </h2>
+      {onMean && <p className="mb-2">{t('notes.bestOnMean', { strategy: names.get(onMean) })}</p>}
+      {all.length > 0 && <IssueList issues={all} document={document} />}
+    </section>
+  );
+}

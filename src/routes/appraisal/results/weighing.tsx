@@ -1,0 +1,117 @@
+/** The beam, what it weighs in words, and the policy thresholds to put the poise at. */
+import { useMemo } from 'react';
+import { useTranslation } from 'react-i18next';
+import { frontierSegments } from '../../../../shared/analysis/frontier-segments.ts';
+import {
+  defaultPair,
+  type Lever,
+  lever,
+  type WeighedPair,
+} from '../../../../shared/analysis/lever.ts';
+import { Beam } from '../../../features/beam/beam.tsx';
+import { beamScale } from '../../../features/beam/scale.ts';
+import { formatMoney } from '../../../i18n/format.ts';
+import type { Language } from '../../../store/settings.ts';
+import type { Result } from '../context.ts';
+
+interface WeighingProps {
+  readonly result: Result;
+  readonly language: Language;
+}
+
+export function Weighing({ result, language }: WeighingProps) {
+  const { t } = useTranslation();
+  const { document, comparison, now, names, move, outcome, thresholdWords } = result;
+  const { thresholds, currency } = document.question;
+  const scale = useMemo(
+    () =>
+      beamScale(
+        thresholds.map(({ value }) => value),
+        comparison.rows.flatMap(({ icer }) => icer ?? []),
+      ),
+    [thresholds, comparison],
+  );
+  const segments = useMemo(
+    () => frontierSegments(comparison.rows, scale.max),
+    [comparison, scale.max],
+  );
+  const ranges = useMemo(
+    () => frontierSegments(comparison.rows, Number.POSITIVE_INFINITY),
+    [comparison],
+  );
+  const pair = defaultPair(comparison.rows, now.best);
+  if (!pair) return <p className="mt-2 text-mute">{t('beam.alone')}</p>;
+  const weighed = lever(pair, now.threshold);
+  const money = (value: number) => formatMoney(value, currency.symbol, language);
+  return (
+    <section aria-label={t('beam.title')}>
+      <p className="mt-1 mb-4 max-w-[62em] text-mute">
+        {t(weighed.hook === 'lift' ? 'beam.hookSaves' : 'beam.hookCosts', {
+          strategy: names.get(pair.strategy),
+          against: names.get(pair.against),
+        })}{' '}
+        {t(weighed.poise === 'loss' ? 'beam.poiseLoses' : 'beam.poiseGains', {
+          gained: outcome.gained,
+        })}{' '}
+        {t('beam.along', { unit: outcome.per })}
+      </p>
+      <Beam
+        scale={scale}
+        threshold={now.threshold}
+        segments={segments}
+        ranges={ranges}
+        notches={thresholds}
+        lever={weighed}
+        pair={pair}
+        names={names}
+        wordFor={thresholdWords}
+        moneyFor={money}
+        best={names.get(now.best) ?? now.best}
+        onMove={move}
+        language={language}
+      />
+      <Reading {...{ weighed, pair, result, max: scale.max }} money={money} />
+      <div className="mt-4 flex flex-wrap items-center gap-2">
+        <span className="mr-1 text-sm text-mute">{t('beam.notches')}</span>
+        {thresholds.map(({ id, label, value }) => (
+          <button
+            key={id}
+            type="button"
+            aria-pressed={value === now.threshold}
+            className="control gap-2 px-3 text-left text-sm aria-pressed:border-brass aria-pressed:bg-brass-soft"
+            onClick={() => move({ to: value, starts: true })}
+          >
+            <span className="font-bold">{money(value)}</span>
+            {label}
+          </button>
+        ))}
+      </div>
+    </section>
+  );
+}
+
+interface ReadingProps {
+  readonly weighed: Lever;
+  readonly pair: WeighedPair;
+  readonly result: Result;
+  readonly max: number;
+  readonly money: (value: number) => string;
+}
+
+/** What the beam shows, in words. */
+function Reading({ weighed, pair, result, max, money }: ReadingProps) {
+  const { t } = useTranslation();
+  const { names, now, thresholdWords } = result;
+  const who = { strategy: names.get(pair.strategy), against: names.get(pair.against) };
+  const benefit = now.threshold * pair.incrementalHealth - pair.incrementalCost;
+  const threshold = thresholdWords(now.threshold);
+  const sentences = [
+    t(`beam.words.${weighed.word}`, { ...who, threshold, amount: money(Math.abs(benefit)) }),
+  ];
+  if (weighed.hook === 'lift') sentences.push(t('beam.savingsLift'));
+  if (weighed.poise === 'loss') sentences.push(t('beam.lossLifts'));
+  if (weighed.levelAt !== null && weighed.levelAt > max) {
+    sentences.push(t('beam.levelBeyond', { threshold: thresholdWords(weighed.levelAt) }));
+  }
+  return <p className="mt-2 max-w-[62em] text-mute">{sentences.join(' ')}</p>;
+}

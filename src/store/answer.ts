@@ -1,0 +1,112 @@
+/**
+ * The answer at one threshold: what the strip, the beam and the table show. Costs and
+ * health are the base case's; the chances are those of the draws.
+ */
+import { againstComparator } from '../../shared/analysis/against-comparator.ts';
+import { toHealth } from '../../shared/analysis/direction.ts';
+import { type IncrementalRow, incremental } from '../../shared/analysis/incremental.ts';
+import { netBenefit } from '../../shared/analysis/net-benefit.ts';
+import type { Option } from '../../shared/analysis/option.ts';
+import { affectedPopulation, forPopulation } from '../../shared/analysis/population.ts';
+import type { Draws } from '../../shared/analysis/psa/draws.ts';
+import { evpi } from '../../shared/analysis/psa/evpi.ts';
+import { sweep } from '../../shared/analysis/psa/sweep.ts';
+import type { BaseRun } from '../../shared/engine/results.ts';
+import type { ModelDocument } from '../../shared/model/document.ts';
+
+export interface Comparison {
+  /** In document order. */
+  readonly options: readonly Option[];
+  /** In order of cost. */
+  readonly rows: readonly IncrementalRow[];
+}
+
+export interface Estimate {
+  readonly value: number;
+  /** Monte Carlo standard error; null for one draw. */
+  readonly standardError: number | null;
+}
+
+export interface Chances {
+  /** Share of the draws in which the strategy named in the answer is best. */
+  readonly probabilityBest: Estimate;
+  /** Money per person. */
+  readonly evpi: Estimate;
+  /** Money for all who are affected; null where the question does not say how many. */
+  readonly populationEvpi: Estimate | null;
+  /** Strategy best on the mean of the draws, where it is not the one named. */
+  readonly bestOnMean: string | null;
+}
+
+export interface Answer {
+  readonly threshold: number;
+  readonly best: string;
+  /** Others as good as the best, up to rounding. */
+  readonly tied: readonly string[];
+  /** Incremental net monetary benefit of the best against the comparator, money per person. */
+  readonly netBenefit: number;
+  /** Net monetary benefit of each strategy, money per person. */
+  readonly nmb: ReadonlyMap<string, number>;
+  /** Null until the draws are there. */
+  readonly chances: Chances | null;
+}
+
+/** @throws DocumentError `analysis.notFinite` */
+export function compare(document: ModelDocument, base: BaseRun): Comparison {
+  const { direction } = document.question.outcome;
+  const options = base.strategies.map(({ id, cost, outcome }) => ({
+    id,
+    cost,
+    health: toHealth(outcome, direction),
+  }));
+  return { options, rows: incremental(options) };
+}
+
+/** @param threshold money per unit of health, 0 or more. */
+export function answerAt(
+  document: ModelDocument,
+  { options }: Comparison,
+  draws: Draws | null,
+  threshold: number,
+): Answer {
+  const { rows, best, tied } = netBenefit(options, threshold);
+  const chosen = best ?? document.question.comparator;
+  const against = againstComparator(options, document.question.comparator, threshold);
+  return {
+    threshold,
+    best: chosen,
+    tied: tied.filter((id) => id !== chosen),
+    netBenefit: against.find(({ id }) => id === chosen)?.inmb ?? 0,
+    nmb: new Map(rows.map((row) => [row.id, row.nmb])),
+    chances: draws && chancesAt(document, draws, threshold, chosen),
+  };
+}
+
+function chancesAt(
+  document: ModelDocument,
+  draws: Draws,
+  threshold: number,
+  chosen: string,
+): Chances {
+  const swept = sweep(draws, [threshold]);
+  const point = swept.points[0];
+  const value = evpi(swept)[0];
+  if (!point || !value) throw new RangeError('one threshold gives one point');
+  const probability = point.probability[draws.strategies.indexOf(chosen)] ?? 0;
+  const perPerson = { value: value.perPerson, standardError: value.standardError };
+  const { beneficiaries } = document.question;
+  const onMean = draws.strategies[point.best] ?? chosen;
+  return {
+    probabilityBest: { value: probability, standardError: shareError(probability, swept.draws) },
+    evpi: perPerson,
+    populationEvpi: beneficiaries
+      ? forPopulation(perPerson, affectedPopulation(beneficiaries, 'startOfYear'))
+      : null,
+    bestOnMean: onMean === chosen ? null : onMean,
+  };
+}
+
+/** Standard error of a share of n independent draws. */
+function shareError(share: number, draws: number): number | null {
+  return draws < 2 ? null : Math.sqrt((share * (1 - share)) / draws);
+}

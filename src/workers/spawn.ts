@@ -1,0 +1,35 @@
+import { type Remote, releaseProxy, wrap } from 'comlink';
+import type { Simulator } from './simulator.ts';
+
+/** A worker as the pool sees it. */
+export interface SimulatorWorker {
+  readonly remote: Pick<Remote<Simulator>, keyof Simulator>;
+  /** Rejects when the worker cannot start or breaks down; Comlink would wait for ever. */
+  readonly failed: Promise<never>;
+  stop(): void;
+}
+
+export function spawnSimulator(): SimulatorWorker {
+  const worker = new Worker(new URL('./simulator.worker.ts', import.meta.url), {
+    type: 'module',
+    name: 'simulator',
+  });
+  const remote = wrap<Simulator>(worker);
+  const failed = new Promise<never>((_, reject) => {
+    worker.addEventListener('error', (event) => {
+      event.preventDefault();
+      reject(new Error(event.message || 'The simulator did not start.'));
+    });
+  });
+  failed.catch(() => {});
+  const stop = () => {
+    remote[releaseProxy]();
+    worker.terminate();
+  };
+  return { remote, failed, stop };
+}
+
+/** All cores but one, which the page keeps; never more than four, for small memories. */
+export function poolSize(): number {
+  return Math.min(4, Math.max(1, (navigator.hardwareConcurrency || 2) - 1));
+}
