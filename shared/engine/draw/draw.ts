@@ -47,7 +47,8 @@ function drawGroups(
   const present = new Map(parameters.map((parameter) => [parameter.id, parameter]));
   const drawable = groups.filter((group) => group.members.some((id) => present.has(id)));
   const alone = ownStreams(parameters, drawable);
-  const names = [...drawable.flatMap(streamNames), ...alone.map((own) => ['parameter', own.id])];
+  const uncertain = alone.filter(({ distribution }) => distribution.type !== 'fixed');
+  const names = [...drawable.flatMap(streamNames), ...uncertain.map(({ id }) => ['parameter', id])];
   const uniforms = planUniforms(names, settings, from, to);
   const drawn = new Map<string, Float64Array>();
   for (const group of drawable) {

@@ -4,6 +4,7 @@
  * over the next even number of bits, walked until it falls inside (Black and Rogaway 2002).
  * The rounds use the 32-bit finaliser of MurmurHash3 (Appleby).
  */
+import { mix } from './mix.ts';
 import { LANES, type Stream, wordsAt } from './stream.ts';
 
 const ROUNDS = 8;
@@ -39,12 +40,4 @@ function encrypt(value: number, half: number, keys: Uint32Array): number {
     right = next;
   }
   return (left << half) | right;
-}
-
-/** Finaliser of MurmurHash3: every bit of the word moves every bit of the result. */
-function mix(word: number): number {
-  let h = word;
-  h = Math.imul(h ^ (h >>> 16), 0x85ebca6b);
-  h = Math.imul(h ^ (h >>> 13), 0xc2b2ae35);
-  return h ^ (h >>> 16);
 }
