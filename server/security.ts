@@ -22,7 +22,6 @@ const POLICY = {
 const DENIED = [
   'accelerometer',
   'autoplay',
-  'bluetooth',
   'browsing-topics',
   'camera',
   'display-capture',
