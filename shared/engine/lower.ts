@@ -23,8 +23,12 @@ export interface Place {
   readonly tunnel?: number;
 }
 
+/** Calls within calls, through variables of variables, that a formula may be deep. */
+const DEEPEST = 1_000;
+
 export class Lowering {
   readonly graph: Graph;
+  private depth = 0;
   private readonly document: ModelDocument;
   private readonly leaves = new Map<string, NodeId>();
   private readonly variables = new Map<string, Variable>();
@@ -61,7 +65,20 @@ export class Lowering {
     return node;
   }
 
+  /** Refuses what would overflow the stack: thousands of variables, each of the next. */
   private expr(expr: Expr, place: Place): NodeId {
+    if (this.depth >= DEEPEST) {
+      throw new DocumentError([error('formula.tooDeepTogether', [], { maximum: DEEPEST })]);
+    }
+    this.depth++;
+    try {
+      return this.exprWithin(expr, place);
+    } finally {
+      this.depth--;
+    }
+  }
+
+  private exprWithin(expr: Expr, place: Place): NodeId {
     if (expr.type === 'number') return this.graph.constant(expr.value);
     if (expr.type === 'name') return this.name(expr.name, place);
     if (expr.fn === 'lookup') return this.lookup(expr.args, place);

@@ -55,7 +55,7 @@ describe('appraise', () => {
 
   it('turns an outcome of which fewer is better, in its ranking and not in its numbers', () => {
     const tiny = tinyDocument();
-    const outcome = { ...tiny.question.outcome, measure: 'daly', direction: 'fewerIsBetter' } as const;
+    const outcome = { ...tiny.question.outcome, measure: 'natural', direction: 'fewerIsBetter' } as const;
     const result = appraised({ ...tiny, question: { ...tiny.question, outcome } });
     const [usual, treatment] = result.strategies;
     expect(treatment!.outcome).toBeGreaterThan(usual!.outcome);
