@@ -20,6 +20,31 @@ export function formulaPath(formula: StrategyFormula, path: Path, strategyId: st
   return own ? [...path, 'byStrategy', strategyId] : [...path, 'otherwise'];
 }
 
+/** One text of a formula by strategy, with the strategies that it is for. */
+export interface FormulaText {
+  readonly text: string;
+  readonly path: Path;
+  readonly strategies: readonly string[];
+}
+
+/** The texts of a formula that holds for `strategies`, each with its place. */
+export function textsOf(
+  formula: StrategyFormula,
+  path: Path,
+  strategies: readonly string[],
+): FormulaText[] {
+  if (typeof formula === 'string') return [{ text: formula, path, strategies }];
+  const { byStrategy, otherwise } = formula;
+  const texts: FormulaText[] = Object.entries(byStrategy).map(([id, text]) => {
+    return { text, path: [...path, 'byStrategy', id], strategies: [id] };
+  });
+  if (otherwise !== undefined) {
+    const rest = strategies.filter((id) => !Object.hasOwn(byStrategy, id));
+    texts.push({ text: otherwise, path: [...path, 'otherwise'], strategies: rest });
+  }
+  return texts;
+}
+
 /** Variables in document order; those that the scenario overrides with its formulas. */
 export function definitionsIn(document: ModelDocument, scenario?: Scenario): Definition[] {
   const definitions = document.variables.map(({ id, symbol, formula, kind }, index): Definition => {

@@ -4,20 +4,20 @@ import type { CallExpr, Expr, NameExpr } from './expr.ts';
 import { type FormulaFunction, FUNCTIONS } from './functions.ts';
 import type { Scope, ScopeEntry } from './scope.ts';
 
+const known = new WeakMap<Expr, ReadonlySet<string>>();
+
 /** Names in the order of their first use, tables included, functions left out. */
 export function namesIn(expr: Expr): ReadonlySet<string> {
+  const before = known.get(expr);
+  if (before) return before;
   const names = new Set<string>();
   const visit = (part: Expr): void => {
     if (part.type === 'name') names.add(part.name);
     if (part.type === 'call') part.args.forEach(visit);
   };
   visit(expr);
+  known.set(expr, names);
   return names;
-}
-
-export interface NameOptions {
-  /** Whether `time_in_state` has a meaning where the formula stands. */
-  readonly timeInState: boolean;
 }
 
 /** Where a name is first used as a value, or undefined. */
@@ -29,6 +29,11 @@ export function placeOf(expr: Expr, name: string): Span | undefined {
     if (place) return place;
   }
   return undefined;
+}
+
+export interface NameOptions {
+  /** Whether `time_in_state` has a meaning where the formula stands. */
+  readonly timeInState: boolean;
 }
 
 /** Issues reported of one formula; what follows is mostly noise. */

@@ -149,9 +149,20 @@ export function readFormula(text: string, limits: Limits = LIMITS): Parsed {
   return issue ? { issues: [issue] } : convertText(text, limits);
 }
 
-/** Texts remembered at once; the oldest goes first. */
-const REMEMBERED = 5_000;
+/** Characters of text whose answers are remembered; the oldest go first. */
+const REMEMBERED = 1_000_000;
 const memory = new Map<string, Parsed>();
+let remembered = 0;
+
+function remember(text: string, parsed: Parsed): void {
+  memory.set(text, parsed);
+  remembered += text.length;
+  for (const oldest of memory.keys()) {
+    if (remembered <= REMEMBERED) return;
+    memory.delete(oldest);
+    remembered -= oldest.length;
+  }
+}
 
 /**
  * The expression of a formula, or what is wrong with it: one issue with an empty
@@ -166,8 +177,7 @@ export function parseFormula(text: string): Parsed {
   const known = memory.get(text);
   if (known) return known;
   const parsed = readFormula(text);
-  const oldest = memory.keys().next();
-  if (memory.size >= REMEMBERED && !oldest.done) memory.delete(oldest.value);
-  memory.set(text, parsed);
+  // Keeping a copy of a huge text only to refuse it again is worth nothing.
+  if (text.length <= LIMITS.length) remember(text, parsed);
   return parsed;
 }

@@ -11,12 +11,13 @@ export interface Token {
   readonly at: Span;
 }
 
-const SPACE = /[ \t\r\n]+/y;
-const NUMBER = /(?:\d+(?:\.\d+)?|\.\d+)(?:[eE][+-]?\d+)?/y;
-/** A number with whatever sticks to it, so that `12abc` and `1.2.3` are refused whole. */
-const NUMBER_LIKE = /(?:\d|\.\d)(?:[eE][+-]\d|[A-Za-z0-9_.])*/y;
-const WORD = /[A-Za-z_][A-Za-z0-9_]*/y;
-const OPERATOR = /<=|>=|==|!=|[-+*/^<>]/y;
+/**
+ * White space, a number with whatever sticks to it (so that `12abc` and `1.2.3` are
+ * refused whole), a word, an operator, or a mark: one group each.
+ */
+const PIECE =
+  /([ \t\r\n]+)|((?:\d|\.\d)(?:[eE][+-]?\d|[A-Za-z0-9_.])*)|([A-Za-z_][A-Za-z0-9_]*)|(<=|>=|==|!=|[-+*/^<>])|([(),])/y;
+const NUMBER = /^(?:\d+(?:\.\d+)?|\.\d+)(?:[eE][+-]?\d+)?$/;
 const MARKS: ReadonlyMap<string, Token['type']> = new Map([
   ['(', 'open'],
   [')', 'close'],
@@ -46,37 +47,22 @@ const INSTEAD: ReadonlyMap<string, string> = new Map([
   ['\u2260', '!='],
 ]);
 
-function match(pattern: RegExp, text: string, at: number): string | undefined {
-  pattern.lastIndex = at;
-  return pattern.exec(text)?.[0];
+type Found = { readonly token: Token } | { readonly issue: Issue } | undefined;
+
+/** A token, an issue in its place, or undefined for white space. */
+function classify([text, space, number, word, operator]: RegExpExecArray, start: number): Found {
+  const at = { start, end: start + text.length };
+  if (space !== undefined) return undefined;
+  if (number !== undefined) return numberToken(text, at);
+  if (word !== undefined) return { token: { type: 'word', text, at } };
+  if (operator !== undefined) return { token: { type: 'operator', text, at } };
+  return { token: { type: MARKS.get(text) ?? 'comma', text, at } };
 }
 
-/** The token at `at`, or the issue that stands in its place. */
-function tokenAt(text: string, at: number): Token | Issue {
-  const make = (type: Token['type'], found: string): Token => ({
-    type,
-    text: found,
-    at: { start: at, end: at + found.length },
-  });
-  const numberLike = match(NUMBER_LIKE, text, at);
-  if (numberLike !== undefined) return numberToken(text, at, numberLike);
-  const word = match(WORD, text, at);
-  if (word !== undefined) return make('word', word);
-  const operator = match(OPERATOR, text, at);
-  if (operator !== undefined) return make('operator', operator);
-  const mark = MARKS.get(text.charAt(at));
-  return mark ? make(mark, text.charAt(at)) : strayCharacter(text, at);
-}
-
-function numberToken(text: string, at: number, numberLike: string): Token | Issue {
-  const span = { start: at, end: at + numberLike.length };
-  if (match(NUMBER, text, at) !== numberLike) {
-    return error('formula.badNumber', [], { text: numberLike }, span);
-  }
-  if (!Number.isFinite(Number(numberLike))) {
-    return error('formula.numberTooLarge', [], { text: numberLike }, span);
-  }
-  return { type: 'number', text: numberLike, at: span };
+function numberToken(text: string, at: Span): Found {
+  if (!NUMBER.test(text)) return { issue: error('formula.badNumber', [], { text }, at) };
+  if (Number.isFinite(Number(text))) return { token: { type: 'number', text, at } };
+  return { issue: error('formula.numberTooLarge', [], { text }, at) };
 }
 
 function strayCharacter(text: string, at: number): Issue {
@@ -97,15 +83,13 @@ export function scan(text: string): { tokens: readonly Token[] } | { issue: Issu
   const tokens: Token[] = [];
   let at = 0;
   while (at < text.length) {
-    const space = match(SPACE, text, at);
-    if (space !== undefined) {
-      at += space.length;
-      continue;
-    }
-    const found = tokenAt(text, at);
-    if ('code' in found) return { issue: found };
-    tokens.push(found);
-    at = found.at.end;
+    PIECE.lastIndex = at;
+    const piece = PIECE.exec(text);
+    if (!piece) return { issue: strayCharacter(text, at) };
+    const found = classify(piece, at);
+    if (found && 'issue' in found) return found;
+    if (found) tokens.push(found.token);
+    at += piece[0].length;
   }
   return { tokens };
 }

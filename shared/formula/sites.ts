@@ -15,26 +15,6 @@ export interface Site {
   readonly timeInState: boolean;
 }
 
-/** One text of a site, with the strategies that it is the formula of. */
-export interface SiteText {
-  readonly text: string;
-  readonly path: Path;
-  readonly strategies: readonly string[];
-}
-
-export function textsOf({ formula, path, strategies }: Site): SiteText[] {
-  if (typeof formula === 'string') return [{ text: formula, path, strategies }];
-  const { byStrategy, otherwise } = formula;
-  const texts: SiteText[] = Object.entries(byStrategy).map(([id, text]) => {
-    return { text, path: [...path, 'byStrategy', id], strategies: [id] };
-  });
-  if (otherwise !== undefined) {
-    const rest = strategies.filter((id) => !Object.hasOwn(byStrategy, id));
-    texts.push({ text: otherwise, path: [...path, 'otherwise'], strategies: rest });
-  }
-  return texts;
-}
-
 const kindPlace = (kind: Extract<Place, { type: 'kind' }>['kind']): Place => ({
   type: 'kind',
   kind,
