@@ -22,6 +22,18 @@ export const ISSUE_WORDS: Readonly<Record<string, string>> = {
   'command.oneDocument': 'give one file, or one example with --example',
   'command.unknownOption': 'an option is not known, or has no value',
 
+  'distribution.empty': '{parameter} is drawn from an empty list',
+  'distribution.infinite': 'some draws of {parameter} would be infinite',
+  'distribution.limits': 'limits of {parameter} do not rise: low {low}[, mode {mode}], high {high}',
+  'distribution.notFinite': '{name} of {parameter} is {value}, not a finite number',
+  'distribution.notPositive': '{name} of {parameter} is {value}; it must be above 0',
+  'distribution.outsideKind':
+    'draws of {parameter} can leave what a {kind} can be ({low} to {high}): a share of {share}',
+  'distribution.unusualForKind': '{parameter}: {distribution} is an unusual choice for a {kind}',
+  'distribution.valueFar':
+    'the base value {value} of {parameter} is outside the 95% interval of its draws ({low} to {high})',
+  'distribution.valueOutside':
+    'the base value {value} of {parameter} can never be drawn ({low} to {high})',
   'distribution.noGroup': '{parameter} is drawn in the group {group}, which does not hold it',
 
   'document.badVersion': 'formatVersion must be a whole number from 1 on',
@@ -98,6 +110,7 @@ export const ISSUE_WORDS: Readonly<Record<string, string>> = {
   'formula.syntax': 'the formula cannot be read',
   'formula.tableWithoutLookup': '{name} is a table: use lookup({name}, ...)',
   'formula.tooDeep': 'nested deeper than {limit} levels',
+  'formula.tooDeepTogether': 'definitions rest on one another more than {maximum} deep',
   'formula.tooLarge': 'more than {limit} parts in one formula',
   'formula.tooLong': '{length} characters, more than the {limit} that are read',
   'formula.tooMuchText': 'all formulas together have {length} characters, more than {limit}',
@@ -115,17 +128,30 @@ export const ISSUE_WORDS: Readonly<Record<string, string>> = {
   'formula.yearlyCostPerCycle': 'a cost per year stands where a cost per cycle is meant',
   'formula.yearlyWeightPerCycle': 'a {got} counts by the year, but is paid each cycle',
 
-  'group.notPositiveDefinite': 'the matrix of the group {group} is not positive definite',
+  'group.kind': '{parameter} in the Dirichlet group {group} is a {kind}, not a probability',
+  'group.memberFixed': '{parameter} is fixed and cannot be correlated in the group {group}',
+  'group.memberInTwo': '{parameter} is in two groups: {other} and {group}',
+  'group.notCorrelation':
+    'correlations of the group {group} must lie from -1 to 1, with 1 on the diagonal',
+  'group.notFinite': 'the group {group} holds a number that is not finite',
+  'group.notPointing': '{parameter} is listed by the group {group} but not drawn in it',
+  'group.notPositive': 'counts of the group {group} must be above 0',
+  'group.notPositiveDefinite':
+    'the matrix of the group {group} is not positive definite: no distribution has it',
+  'group.notSymmetric': 'the matrix of the group {group} is not symmetric',
+  'group.ownDistribution':
+    '{parameter} needs a distribution of its own to be ranked in the group {group}',
+  'group.repeatedMember': '{parameter} is a member of the group {group} twice',
+  'group.size': '{name} of the group {group} should have {want} items, one a member; got {got}',
+  'group.unknownMember': 'the group {group} lists {parameter}, which does not exist',
+  'group.valuesSum': 'base values of the probabilities in {group} sum to {sum}, not 1',
 
   'groups.doesNotListMember': '{parameter} is drawn in the group {group}, which does not list it',
   'groups.memberNeedsOwnDistribution':
     '{parameter} needs a distribution of its own to be ranked in the group {group}',
   'groups.memberNotInGroup': '{parameter} is listed by the group {group} but not drawn in it',
   'groups.memberTwice': '{id} is a member twice',
-  'groups.notCorrelation': '{value} is no correlation (1 on the diagonal, -1 to 1 elsewhere)',
-  'groups.notSymmetric': 'the matrix is not symmetric at row {row}, column {column}',
   'groups.unknown': 'there is no group {id}',
-  'groups.valuesDoNotSum': 'base values of the probabilities in {group} sum to {sum}, not 1',
   'groups.wrongLength': 'expected {expected} items, one a member; got {got}',
 
   'ids.duplicate': 'the id {id} is given twice in this list',

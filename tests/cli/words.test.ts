@@ -12,7 +12,7 @@ function codesInSources(): Map<string, string> {
   for (const file of readdirSync(SHARED, { recursive: true, encoding: 'utf8' })) {
     if (!file.endsWith('.ts') || file === 'cli/issue-words.ts') continue;
     const source = readFileSync(new URL(file, SHARED), 'utf8');
-    for (const [, code] of source.matchAll(/['"`]([a-z][A-Za-z]*\.[a-z][A-Za-z]*)['"`]/g)) {
+    for (const [, code] of source.matchAll(/['"]([a-z][A-Za-z]*\.[a-z][A-Za-z]*)['"]/g)) {
       if (!code!.endsWith('.ts') && !code!.endsWith('.json')) codes.set(code!, file);
     }
   }

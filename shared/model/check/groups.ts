@@ -1,13 +1,11 @@
 import type { Group, Parameter } from '../document.ts';
-import { error, type Issue, type Path, warning } from '../issue.ts';
+import { error, type Issue, type Path } from '../issue.ts';
 import type { Lookups } from './lookups.ts';
 
-/** How far apart the two halves of a symmetric matrix may be. */
-const SYMMETRY = 1e-9;
-/** How far from 1 the values of a Dirichlet group may sum: values are often rounded. */
-const VALUES_SUM = 1e-6;
-
-/** Groups and their members name each other, and a group's numbers fit its members. */
+/**
+ * Groups and their members name each other, and a group has a number for each member.
+ * Whether the numbers can be drawn from is for the engine to say (its distributions).
+ */
 export function checkGroups(lookups: Lookups): Issue[] {
   const { document } = lookups;
   return [
@@ -36,8 +34,7 @@ function checkGroup(lookups: Lookups, group: Group, path: Path): Issue[] {
     ...group.members.flatMap((id, index) =>
       checkMember(lookups, group, id, index, [...path, 'members', index]),
     ),
-    ...checkNumbers(group, path),
-    ...checkValuesSum(lookups, group, path),
+    ...checkSizes(group, path),
   ];
 }
 
@@ -62,7 +59,7 @@ function checkMember(
   return [error('groups.memberNotInGroup', path, params)];
 }
 
-function checkNumbers(group: Group, path: Path): Issue[] {
+function checkSizes(group: Group, path: Path): Issue[] {
   const size = group.members.length;
   switch (group.type) {
     case 'dirichlet':
@@ -73,9 +70,9 @@ function checkNumbers(group: Group, path: Path): Issue[] {
         ...checkMatrix(group.covariance, size, [...path, 'covariance']),
       ];
     case 'rankCorrelation':
-      return checkCorrelation(group.correlation, size, [...path, 'correlation']);
+      return checkMatrix(group.correlation, size, [...path, 'correlation']);
     case 'jointRows':
-      return group.rows.flatMap((row, at) => checkLength(row, size, [...path, 'rows', at]));
+      return checkRows(group.rows, size, [...path, 'rows']);
   }
 }
 
@@ -84,42 +81,15 @@ function checkLength(list: readonly unknown[], expected: number, path: Path): Is
   return [error('groups.wrongLength', path, { expected, got: list.length })];
 }
 
-type Matrix = readonly (readonly number[])[];
-
-function checkMatrix(matrix: Matrix, size: number, path: Path): Issue[] {
-  const wrong = [
+function checkMatrix(matrix: readonly (readonly number[])[], size: number, path: Path): Issue[] {
+  return [
     ...checkLength(matrix, size, path),
     ...matrix.flatMap((row, at) => checkLength(row, size, [...path, at])),
   ];
-  if (wrong.length > 0) return wrong;
-  return matrix.flatMap((row, i) => {
-    const j = row.findIndex((value, at) => !mirrors(value, matrix[at]![i]!));
-    return j < 0
-      ? []
-      : [error('groups.notSymmetric', [...path, i, j], { row: i + 1, column: j + 1 })];
-  });
 }
 
-function mirrors(a: number, b: number): boolean {
-  return Math.abs(a - b) <= SYMMETRY * Math.max(1, Math.abs(a), Math.abs(b));
-}
-
-/** A correlation matrix: symmetric, 1 on the diagonal, all within [-1, 1]. */
-function checkCorrelation(matrix: Matrix, size: number, path: Path): Issue[] {
-  const wrong = checkMatrix(matrix, size, path);
-  if (wrong.length > 0) return wrong;
-  return matrix.flatMap((row, i) =>
-    row.flatMap((value, j) => {
-      if (i === j ? value === 1 : Math.abs(value) <= 1) return [];
-      return [error('groups.notCorrelation', [...path, i, j], { value })];
-    }),
-  );
-}
-
-/** Probabilities of one row: their base values should sum to 1, as every draw does. */
-function checkValuesSum({ parameters }: Lookups, group: Group, path: Path): Issue[] {
-  if (group.type !== 'dirichlet') return [];
-  const sum = group.members.reduce((total, id) => total + (parameters.get(id)?.value ?? 0), 0);
-  if (Math.abs(sum - 1) <= VALUES_SUM) return [];
-  return [warning('groups.valuesDoNotSum', [...path, 'members'], { group: group.id, sum })];
+/** The first row that does not fit: a sample has up to 100,000. */
+function checkRows(rows: readonly (readonly number[])[], size: number, path: Path): Issue[] {
+  const at = rows.findIndex((row) => row.length !== size);
+  return at < 0 ? [] : checkLength(rows[at]!, size, [...path, at]);
 }

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import type { Group, ModelDocument } from '../../../shared/model/document.ts';
-import { issuesOf, said } from './codes.ts';
+import { said } from './codes.ts';
 
 const base = { id: 'g', label: 'Together', members: ['p_die', 'rr_die'] };
 const normal: Group = {
@@ -99,42 +99,4 @@ test('numbers fit the members', () => {
   expect(said(grouped({ ...base, type: 'dirichlet', counts: [1, 2, 3] }))).toContain(
     'groups.wrongLength groups.0.counts',
   );
-});
-
-test('matrices are symmetric, correlations 1 on the diagonal and within [-1, 1]', () => {
-  expect(
-    said(
-      grouped({
-        ...normal,
-        covariance: [
-          [1, 0.2],
-          [0.3, 1],
-        ],
-      }),
-    ),
-  ).toEqual([
-    'groups.notSymmetric groups.0.covariance.0.1',
-    'groups.notSymmetric groups.0.covariance.1.0',
-  ]);
-  expect(
-    said(
-      grouped({
-        ...ranks,
-        correlation: [
-          [1, 2],
-          [2, 0.5],
-        ],
-      }),
-    ),
-  ).toEqual([
-    'groups.notCorrelation groups.0.correlation.0.1',
-    'groups.notCorrelation groups.0.correlation.1.0',
-    'groups.notCorrelation groups.0.correlation.1.1',
-  ]);
-});
-
-test('base values of a Dirichlet row that do not sum to 1 are warned of', () => {
-  const issues = issuesOf(grouped({ ...base, type: 'dirichlet', counts: [1, 9] }));
-  expect(issues).toMatchObject([{ code: 'groups.valuesDoNotSum', severity: 'warning' }]);
-  expect(issues[0]?.params.sum).toBeCloseTo(0.9, 12);
 });
