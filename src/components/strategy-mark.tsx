@@ -11,7 +11,7 @@ export interface StrategyMark {
 }
 
 const COLORS = 8;
-const DASHES = ['', '10 3', '5 3', '10 3 3 3', '2.5 2.5', '14 3 3 3 3 3'];
+const DASHES = ['', '24 2.5', '12 2.5', '24 2.5 5 2.5', '6 2.5', '24 2.5 5 2.5 5 2.5'];
 /** Paths about the origin, of like weight to the eye. */
 const MARKERS = [
   'M-6.5 0 A6.5 6.5 0 1 1 6.5 0 A6.5 6.5 0 1 1 -6.5 0 Z',

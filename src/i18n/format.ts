@@ -43,7 +43,12 @@ export function formatAmount(value: number, language: Language): string {
 
 /** Large sums in words, such as "KM 3.1 million". */
 export function formatLargeMoney(value: number, symbol: string, language: Language): string {
-  if (Math.abs(value) < 100_000) return formatMoney(value, symbol, language);
+  const size = Math.abs(value);
+  if (size < 1_000_000) {
+    // Three figures: a sum for a population is no surer than that.
+    const grain = 10 ** Math.max(0, Math.floor(Math.log10(size || 1)) - 2);
+    return formatMoney(Math.round(value / grain) * grain, symbol, language);
+  }
   const format = new Intl.NumberFormat(language, {
     notation: 'compact',
     compactDisplay: 'long',

@@ -63,14 +63,23 @@ export const fr: Words = {
   },
   threshold: '{{amount}} par {{unit}}',
   outcome: {
-    qaly: { plural: 'QALY', singular: 'QALY', gained: 'QALY gagnés' },
+    qaly: { plural: 'QALY', singular: 'QALY', gained: 'QALY gagnés', lost: 'QALY perdus' },
     lifeYears: {
       plural: 'Années de vie',
       singular: 'année de vie',
       gained: 'années de vie gagnées',
+      lost: 'années de vie perdues',
     },
-    daly: { plural: 'DALY', singular: 'DALY', gained: 'DALY évités', per: 'DALY évité' },
-    gained: '{{plural}} en plus',
+    daly: {
+      plural: 'DALY',
+      singular: 'DALY',
+      gained: 'DALY évités',
+      lost: 'DALY ajoutés',
+      per: 'DALY évité',
+    },
+    gained: '{{unit}} en plus',
+    lost: '{{unit}} en moins',
+    added: '{{unit}} en plus',
     averted: '{{unit}} en moins',
     avertedOne: '{{unit}} en moins',
   },
@@ -122,7 +131,7 @@ export const fr: Words = {
     hookCosts: 'Au crochet, ce que {{strategy}} coûte de plus que {{against}}\u00A0;',
     hookSaves: 'Au crochet, ce que {{strategy}} économise par rapport à {{against}}\u00A0;',
     poiseGains: 'au poids, les {{gained}}\u00A0;',
-    poiseLoses: 'au poids, les {{gained}} auxquels on renonce\u00A0;',
+    poiseLoses: 'au poids, les {{lost}}\u00A0;',
     along:
       'le long du bras, ce que peut coûter 1 {{unit}}. Faites glisser le poids, ou utilisez les flèches du clavier.',
     alone: 'Avec une seule stratégie, il n’y a rien à mettre en balance.',
@@ -189,8 +198,6 @@ export const fr: Words = {
     chart: 'Graphique',
     table: 'Tableau',
     csv: 'CSV',
-    seeTable:
-      'Les noms sont trop proches pour être écrits dans le graphique\u00A0: voyez le tableau.',
   },
   notes: {
     title: 'Ce qu’il faut savoir de ces nombres',

@@ -7,6 +7,8 @@ export interface OutcomeWords {
   readonly plural: string;
   /** What there can be more of, such as "QALYs gained" or "DALYs averted". */
   readonly gained: string;
+  /** The opposite, such as "QALYs given up" or "DALYs added". */
+  readonly lost: string;
   /** What a threshold is per, such as "QALY" or "DALY averted". */
   readonly per: string;
 }
@@ -16,12 +18,17 @@ export function outcomeWords({ outcome }: Question, t: TFunction): OutcomeWords 
   const plural = known ? t(`outcome.${known}.plural`) : outcome.unit;
   const singular = known ? t(`outcome.${known}.singular`) : outcome.unitSingular;
   if (outcome.direction === 'moreIsBetter') {
-    const gained = known ? t(`outcome.${known}.gained`) : t('outcome.gained', { plural });
-    return { plural, gained, per: singular };
+    return {
+      plural,
+      gained: known ? t(`outcome.${known}.gained`) : t('outcome.gained', { unit: plural }),
+      lost: known ? t(`outcome.${known}.lost`) : t('outcome.lost', { unit: plural }),
+      per: singular,
+    };
   }
   return {
     plural,
     gained: known === 'daly' ? t('outcome.daly.gained') : t('outcome.averted', { unit: plural }),
+    lost: known === 'daly' ? t('outcome.daly.lost') : t('outcome.added', { unit: plural }),
     per: known === 'daly' ? t('outcome.daly.per') : t('outcome.avertedOne', { unit: singular }),
   };
 }

@@ -105,7 +105,9 @@ function ProbabilityCell({ now, was, run, language }: AnswerStripProps) {
 
 function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProps) {
   const { t } = useTranslation();
-  const words = ({ evpi }: Chances) => formatMoney(evpi.value, symbol, language);
+  // No more decimals than the error of the run allows.
+  const words = ({ evpi }: Chances) =>
+    formatMoney(evpi.value, symbol, language, { decimals: decimalsFor(evpi) });
   if (!now.chances) {
     return (
       <Cell label={t('strip.evpi')}>
@@ -124,11 +126,11 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
       <MonteCarlo estimate={evpi} decimals={decimalsFor(evpi)} language={language} />
       {populationEvpi && (
         <Small>
-          <Figure name="populationEvpi" value={populationEvpi.value}>
+          <data value={populationEvpi.value} data-figure="populationEvpi">
             {t('strip.population', {
               amount: formatLargeMoney(populationEvpi.value, symbol, language),
             })}
-          </Figure>
+          </data>
           <span className="sr-only"> ({beneficiaries})</span>
         </Small>
       )}

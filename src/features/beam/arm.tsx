@@ -33,7 +33,7 @@ export function Arm(props: ArmProps) {
   const left = hookX - 8;
   const right = endX + 10;
   return (
-    <g aria-hidden="true">
+    <g>
       <path
         d={`M${left} ${y - THIN} L${x} ${y - THICK} L${right} ${y - THIN} V${y + THIN} L${x} ${y + THICK} L${left} ${y + THIN} Z`}
         fill="var(--raised)"

@@ -14,7 +14,7 @@ export function BeamKey({ ranges, names, moneyFor }: BeamKeyProps) {
   const { t } = useTranslation();
   const order = [...names.keys()];
   return (
-    <ul aria-label={t('beam.key')} className="mt-1 grid gap-1">
+    <ul aria-label={t('beam.key')} className="mt-1 grid max-w-xl gap-1">
       {ranges.map(({ strategy, from, to }) => (
         <li key={strategy} className="flex flex-wrap items-center gap-x-2">
           <Swatch index={order.indexOf(strategy)} />

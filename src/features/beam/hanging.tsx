@@ -1,5 +1,4 @@
 /** What hangs on the arm, what it hangs from, and the mark where it lies level. */
-import type { SVGProps } from 'react';
 import { textWidth } from '../../components/text-width.ts';
 import {
   type BeamLayout,
@@ -23,7 +22,7 @@ interface Hanging {
 
 export function Stand({ x, y, bottom }: { x: number; y: number; bottom: number }) {
   return (
-    <g aria-hidden="true" stroke="var(--ink)" fill="none" strokeLinejoin="round">
+    <g stroke="var(--ink)" fill="none" strokeLinejoin="round">
       <path d={`M${x - 15} ${bottom} L${x} ${y} L${x + 15} ${bottom}`} strokeWidth="2.2" />
       <path d={`M${x - 26} ${bottom} H${x + 26}`} strokeWidth="3" strokeLinecap="round" />
     </g>
@@ -37,7 +36,7 @@ export function Hook(props: Hanging & { readonly way: 'load' | 'lift' | 'nothing
   const top = lifts ? -LIFT_RISE : HOOK_DROP;
   const color = lifts ? 'var(--gain)' : 'var(--clay)';
   return (
-    <g transform={`translate(${layout.hookX} ${layout.fulcrum.y})`} aria-hidden="true">
+    <g transform={`translate(${layout.hookX} ${layout.fulcrum.y})`}>
       <g className={moving} style={{ transform: `rotate(${-angle}deg)` }}>
         <line y1="0" y2={lifts ? top + PLATE_HEIGHT : top} stroke="var(--ink)" strokeWidth="1.8" />
         {lifts && <path d={`M-7 ${top + 1} L0 ${top - 8} L7 ${top + 1} Z`} fill={color} />}
@@ -52,19 +51,14 @@ interface PoiseProps extends Hanging {
   readonly x: number;
   /** Health lost is drawn hollow, with an arrow that lifts. */
   readonly loss: boolean;
-  readonly slider: SVGProps<SVGGElement>;
 }
 
-export function Poise({ layout, angle, moving, x, loss, word, amount, width, slider }: PoiseProps) {
+export function Poise({ layout, angle, moving, x, loss, word, amount, width }: PoiseProps) {
   const half = width / 2;
   const top = POISE_DROP;
   const shape = `M${-half} ${top} H${half} L${half + 7} ${top + POISE_HEIGHT - 8} Q0 ${top + POISE_HEIGHT + 8} ${-half - 7} ${top + POISE_HEIGHT - 8} Z`;
   return (
-    <g
-      {...slider}
-      className={`group cursor-grab outline-none active:cursor-grabbing ${moving}`}
-      style={{ transform: `translate(${x}px, ${layout.fulcrum.y}px)` }}
-    >
+    <g className={moving} style={{ transform: `translate(${x}px, ${layout.fulcrum.y}px)` }}>
       <rect x="-6" y="-13" width="12" height="26" rx="2" fill="var(--brass)" />
       <g className={moving} style={{ transform: `rotate(${-angle}deg)` }}>
         <line y1="0" y2={top} stroke="var(--brass)" strokeWidth="2.6" />
@@ -118,7 +112,7 @@ export function LevelMark({ layout, x, words }: { layout: BeamLayout; x: number;
   const edge = layout.fulcrum.y - 20;
   const foot = edge - (layout.namesFit ? 26 : 8);
   return (
-    <g aria-hidden="true">
+    <g>
       <line x1={x} x2={x} y1={foot} y2={edge - 6} stroke="var(--ink)" strokeWidth="1.4" />
       <path d={`M${x} ${edge} l6 -9 h-12 Z`} fill="var(--ink)" />
       <text

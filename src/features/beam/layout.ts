@@ -34,6 +34,9 @@ export const POISE_HEIGHT = 50;
 export const HOOK_DROP = 34;
 export const POISE_DROP = HOOK_DROP + PLATE_HEIGHT + 6;
 
+/** Where the stand ends and where the words under the poise stand, below the arm's middle. */
+export const STAND = POISE_DROP + POISE_HEIGHT + 2;
+export const FOOT = STAND + 24;
 /** How far above the arm's middle the top of a lifting load is. */
 export const LIFT_RISE = PLATE_HEIGHT + 22;
 
@@ -53,16 +56,16 @@ export function beamLayout(
   const fulcrumX = plateEnd + (wide ? 28 : 16);
   const endX = width - MARGIN - (wide ? 16 : 8);
   const room = endX - fulcrumX;
-  const drop = wide ? 40 : 24;
+  const drop = wide ? 48 : 26;
   const xOf = (threshold: number) => fulcrumX + (Math.min(threshold, max) / max) * room;
   const namesFit = segments.every(
-    ({ strategy, from, to }) => textWidth(names.get(strategy) ?? '') + 12 <= xOf(to) - xOf(from),
+    ({ strategy, from, to }) => textWidth(names.get(strategy) ?? '') + 6 <= xOf(to) - xOf(from),
   );
   const rows = ROW + (namesFit ? ROW : 0) + 16 + drop;
   const y = plate.lifts ? Math.max(rows, LIFT_RISE + 22) : rows;
   return {
     width,
-    height: y + drop + POISE_DROP + POISE_HEIGHT + 36,
+    height: y + drop + FOOT + 10,
     fulcrum: { x: fulcrumX, y },
     hookX,
     labelsFrom: plate.lifts ? plateEnd + 4 : 0,

@@ -17,7 +17,7 @@ export function beamScale(thresholds: readonly number[], corners: readonly numbe
   const highest = Math.max(...thresholds, 0);
   const limit = highest > 0 ? 3 * highest : Number.POSITIVE_INFINITY;
   const within = corners.filter((corner) => corner <= limit);
-  const reach = 1.25 * Math.max(highest, ...within, 0);
+  const reach = 1.15 * Math.max(highest, ...within, 0);
   const max = niceAbove(reach > 0 ? reach : 1);
   return { max, step: niceBelow(max / 60) };
 }
@@ -46,7 +46,8 @@ export function settle(
 
 /** Distance between labelled ticks so that each label has its room. */
 export function majorStep(max: number, room: number, labelWidth: number): number {
-  const most = Math.max(1, Math.floor(room / (labelWidth + 20)));
+  const apart = Math.min(44, room / 12);
+  const most = Math.max(1, Math.floor(room / (labelWidth + apart)));
   return niceAbove(max / most, [1, 2, 2.5, 5, 10]);
 }
 
@@ -55,7 +56,7 @@ export function ticks(max: number, step: number): number[] {
   return Array.from({ length: count + 1 }, (_, i) => tidy(i * step));
 }
 
-function niceAbove(value: number, steps = [1, 1.5, 2, 2.5, 3, 4, 5, 6, 8, 10]): number {
+function niceAbove(value: number, steps = [1, 1.2, 1.5, 2, 2.5, 3, 3.5, 4, 5, 6, 8, 10]): number {
   const power = 10 ** Math.floor(Math.log10(value));
   const step = steps.find((each) => each * power >= value * (1 - 1e-9)) ?? 10;
   return tidy(step * power);

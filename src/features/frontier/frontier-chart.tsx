@@ -1,7 +1,7 @@
 /** Cost against health, one mark a strategy, the efficiency frontier drawn through. */
 import { useId } from 'react';
 import { useTranslation } from 'react-i18next';
-import { strategyMark } from '../../components/strategy-mark.tsx';
+import { Swatch, strategyMark } from '../../components/strategy-mark.tsx';
 import { textWidth } from '../../components/text-width.ts';
 import { useWidth } from '../../components/use-width.ts';
 import { formatNumber } from '../../i18n/format.ts';
@@ -61,8 +61,8 @@ export function FrontierChart(props: FrontierChartProps) {
     label: point.name,
   }));
   const area = { left, right: width, top: TOP - 12, bottom: HEIGHT - BOTTOM + 4 };
-  const labels = placeLabels(at, area);
   const line = at.filter(({ onFrontier }) => onFrontier);
+  const labels = placeLabels(at, line, area);
   return (
     <div ref={box}>
       <svg
@@ -134,7 +134,16 @@ export function FrontierChart(props: FrontierChartProps) {
           </text>
         ))}
       </svg>
-      {labels === null && <p className="mt-1 text-sm text-mute">{t('frontier.seeTable')}</p>}
+      {labels === null && (
+        <ul className="mt-1 grid gap-1">
+          {points.map(({ id, name, index }) => (
+            <li key={id} className="flex items-center gap-2 text-sm">
+              <Swatch index={index} />
+              {name}
+            </li>
+          ))}
+        </ul>
+      )}
     </div>
   );
 

@@ -51,10 +51,10 @@ function Table(props: IncrementalTableProps) {
         {rows.map((row) => (
           <tr
             key={row.id}
-            className={row.id === props.best ? 'font-bold' : ''}
+            className={row.id === props.best ? 'font-bold' : '[&_th]:font-normal'}
             data-strategy={row.id}
           >
-            <th scope="row" className="border-b border-rule py-2.5 pr-2 text-left font-[inherit]">
+            <th scope="row" className="border-b border-rule py-2.5 pr-2 text-left">
               <Name id={row.id} names={props.names} />
             </th>
             <Amount>
@@ -132,7 +132,7 @@ function Line({ term, children }: { term: string; children: ReactNode }) {
 function Name({ id, names }: { id: string; names: ReadonlyMap<string, string> }) {
   const index = [...names.keys()].indexOf(id);
   return (
-    <span className="inline-flex items-center gap-2">
+    <span className="flex items-center gap-2">
       <Swatch index={index} />
       {names.get(id)}
     </span>

@@ -32,7 +32,7 @@ export function Frame({ document, file, strip, children }: FrameProps) {
   const close = () => drawer.current?.close();
   return (
     <div className="lg:grid lg:grid-cols-[220px_1fr]">
-      <aside className="sticky top-0 hidden h-dvh flex-col overflow-y-auto border-r border-rule p-5 pr-0 lg:flex">
+      <aside className="sticky top-0 hidden h-dvh flex-col overflow-y-auto p-5 pr-0 lg:flex">
         <Brand />
         <div className="mt-5">
           <Rail steps={steps} />
@@ -59,35 +59,37 @@ export function Frame({ document, file, strip, children }: FrameProps) {
           </div>
         </div>
       </dialog>
-      <div className="mx-auto w-full max-w-[1280px] min-w-0 px-4 pb-12 sm:px-8">
-        <header className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b-2 border-ink py-2">
-          <button
-            type="button"
-            className="control px-3 lg:hidden"
-            onClick={() => drawer.current?.showModal()}
-          >
-            <svg width="18" height="14" viewBox="0 0 18 14" aria-hidden="true">
-              <path d="M0 2 H18 M0 7 H18 M0 12 H18" stroke="currentColor" strokeWidth="2" />
-            </svg>
-            {t('rail.open')}
-          </button>
-          <p className="font-bold">{document?.question.title ?? file}</p>
-          <p className="ml-auto flex min-h-11 items-center gap-2 text-sm text-mute">
-            <span
-              aria-hidden="true"
-              className={`size-2 rounded-full ${file === null ? 'bg-gain' : 'border-2 border-brass'}`}
-            />
-            {file === null ? t('state.example') : t('state.file', { file })}
-          </p>
-        </header>
-        {strip}
-        <main id="main" tabIndex={-1} className="min-w-0 outline-none">
-          {children}
-        </main>
-        <footer className="mt-10 max-w-[70em] border-t border-rule pt-3 text-sm text-mute">
-          {document && <Provenance about={document.about} />}
-          <p>{t('caution')}</p>
-        </footer>
+      <div className="min-h-dvh min-w-0 border-rule lg:border-l">
+        <div className="mx-auto w-full max-w-[1280px] px-4 pb-12 sm:px-8">
+          <header className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b-2 border-ink py-2">
+            <button
+              type="button"
+              className="control px-3 lg:hidden"
+              onClick={() => drawer.current?.showModal()}
+            >
+              <svg width="18" height="14" viewBox="0 0 18 14" aria-hidden="true">
+                <path d="M0 2 H18 M0 7 H18 M0 12 H18" stroke="currentColor" strokeWidth="2" />
+              </svg>
+              {t('rail.open')}
+            </button>
+            <p className="font-bold">{document?.question.title ?? file}</p>
+            <p className="ml-auto flex min-h-11 items-center gap-2 text-sm text-mute">
+              <span
+                aria-hidden="true"
+                className={`size-2 rounded-full ${file === null ? 'bg-gain' : 'border-2 border-brass'}`}
+              />
+              {file === null ? t('state.example') : t('state.file', { file })}
+            </p>
+          </header>
+          {strip}
+          <main id="main" tabIndex={-1} className="min-w-0 outline-none">
+            {children}
+          </main>
+          <footer className="mt-10 max-w-[70em] border-t border-rule pt-3 text-sm text-mute">
+            {document && <Provenance about={document.about} />}
+            <p>{t('caution')}</p>
+          </footer>
+        </div>
       </div>
     </div>
   );

@@ -10,6 +10,7 @@ import { outcomeWords } from '../../i18n/outcome-words.ts';
 import { answerAt, type Comparison } from '../../store/answer.ts';
 import { type Opened, useBase } from '../../store/appraisal.ts';
 import { useDraws } from '../../store/draws.ts';
+import { FILE_SLUG } from '../../store/opened-file.ts';
 import { type PoisePlace, usePoise } from '../../store/poise.ts';
 import { changeSettings, getSettings, useSettings } from '../../store/settings.ts';
 import { BrokenStrip } from './broken-strip.tsx';
@@ -116,7 +117,8 @@ const REST = 400;
 /** Keeps where the poise came to rest, for the next visit. */
 function useKeptThreshold(slug: string, { now, was }: PoisePlace): void {
   useEffect(() => {
-    if (was === null) return;
+    // The next file opened is another model: its thresholds say nothing of this one's.
+    if (was === null || slug === FILE_SLUG) return;
     const timer = setTimeout(() => {
       changeSettings({ thresholds: { ...getSettings().thresholds, [slug]: now } });
     }, REST);

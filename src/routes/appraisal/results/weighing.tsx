@@ -41,7 +41,9 @@ export function Weighing({ result, language }: WeighingProps) {
   );
   const pair = defaultPair(comparison.rows, now.best);
   if (!pair) return <p className="mt-2 text-mute">{t('beam.alone')}</p>;
-  const weighed = lever(pair, now.threshold);
+  // A third of the load tips the arm half way: small differences show, large ones saturate.
+  const half = Math.abs(pair.incrementalCost) / 3;
+  const weighed = lever(pair, now.threshold, half > 0 ? half : undefined);
   const money = (value: number) => formatMoney(value, currency.symbol, language);
   return (
     <section aria-label={t('beam.title')}>
@@ -52,6 +54,7 @@ export function Weighing({ result, language }: WeighingProps) {
         })}{' '}
         {t(weighed.poise === 'loss' ? 'beam.poiseLoses' : 'beam.poiseGains', {
           gained: outcome.gained,
+          lost: outcome.lost,
         })}{' '}
         {t('beam.along', { unit: outcome.per })}
       </p>
