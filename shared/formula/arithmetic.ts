@@ -28,10 +28,10 @@ export const operators = {
 export const choose = (condition: number, a: number, b: number): number =>
   condition === 0 ? b : a;
 
-export const sum = (...terms: number[]): number => terms.reduce((total, term) => total + term);
+export const sum = (...terms: number[]): number => terms.reduce((total, term) => total + term, 0);
 
 export const product = (...factors: number[]): number =>
-  factors.reduce((total, factor) => total * factor);
+  factors.reduce((total, factor) => total * factor, 1);
 
 /** Nearest whole number; a half goes up (2.5 to 3, -2.5 to -2). */
 export const round = (x: number): number => Math.floor(x + 0.5);

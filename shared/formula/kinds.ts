@@ -88,7 +88,7 @@ class Inference {
         return this.difference(call, a, b);
       case 'multiply':
       case 'product':
-        return args.reduce(multiplyKinds);
+        return args.slice(1).reduce(multiplyKinds, a);
       case 'divide':
         return divideKinds(a, b);
       case 'power':

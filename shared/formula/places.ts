@@ -3,6 +3,7 @@ import type { Payoff, Question, Row } from '../model/document.ts';
 import { error, type Issue, warning } from '../model/issue.ts';
 import type { Kind } from '../model/kinds.ts';
 import type { Expr } from './expr.ts';
+import { FUNCTIONS } from './functions.ts';
 import { type Inferred, isMoney } from './kind-algebra.ts';
 import { MEANING } from './meaning.ts';
 import { mismatchIssue, severityOf } from './mismatch.ts';
@@ -78,6 +79,8 @@ function checkOutcomePlace(
 export function constantValue(expr: Expr): number | undefined {
   if (expr.type === 'number') return expr.value;
   if (expr.type === 'name') return undefined;
+  const fn = FUNCTIONS.get(expr.fn);
+  if (!fn || expr.args.length < fn.min || expr.args.length > fn.max) return undefined;
   const args = expr.args.map(constantValue);
   const isConstant = (arg: number | undefined): arg is number => arg !== undefined;
   return args.every(isConstant) ? MEANING.get(expr.fn)?.(...args) : undefined;
