@@ -2,7 +2,7 @@
 import betainc from '@stdlib/math-base-special-betainc';
 import betaln from '@stdlib/math-base-special-betaln';
 import exp from '@stdlib/math-base-special-exp';
-import betaQuantile from '@stdlib/stats-base-dists-beta-quantile';
+import { betaInverse } from './beta-inverse.ts';
 import { timesLog, timesLog1p } from './powers.ts';
 import type { Univariate } from './univariate.ts';
 
@@ -13,7 +13,7 @@ export function beta({ alpha, beta: other }: { alpha: number; beta: number }): U
   const logpdf = (x: number) =>
     x < 0 || x > 1 ? -Infinity : timesLog(alpha - 1, x) + timesLog1p(other - 1, -x) - constant;
   return {
-    quantile: (p) => betaQuantile(p, alpha, other),
+    quantile: betaInverse(alpha, other),
     cdf: (x) => (x <= 0 ? 0 : x >= 1 ? 1 : betainc(x, alpha, other)),
     sf: (x) => (x <= 0 ? 1 : x >= 1 ? 0 : betainc(x, alpha, other, true, true)),
     pdf: (x) => exp(logpdf(x)),

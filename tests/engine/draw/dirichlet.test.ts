@@ -22,11 +22,12 @@ describe.each(goldenDirichlets)('$id', (golden) => {
   const drawn = draw(golden.alpha);
 
   it('sums to 1 in every draw, each share within [0, 1]', () => {
-    for (let d = 0; d < n; d++) {
+    const off = drawn[0]?.map((_, d) => {
       const row = drawn.map((column) => column[d] ?? Number.NaN);
-      expect(Math.abs(row.reduce((sum, x) => sum + x, 0) - 1)).toBeLessThan(1e-14);
-      expect(row.every((x) => x >= 0 && x <= 1)).toBe(true);
-    }
+      const inside = row.every((x) => x >= 0 && x <= 1);
+      return inside ? Math.abs(row.reduce((sum, x) => sum + x, 0) - 1) : Number.NaN;
+    });
+    expect(Math.max(...(off ?? [Number.NaN]))).toBeLessThan(1e-14);
   });
 
   it('has the declared means and covariances within 4 Monte Carlo errors', () => {

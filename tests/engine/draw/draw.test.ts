@@ -25,7 +25,7 @@ const members = dirichlet.members.map((id) =>
 );
 
 const settings = (more: Partial<SamplingSettings> = {}): SamplingSettings => ({
-  samples: 1000,
+  samples: 400,
   seed: 11,
   plan: 'plain',
   ...more,
@@ -40,10 +40,10 @@ const draw = (
 describe.each(PLANS)('drawParameters, %s plan', (plan) => {
   it('gives the same block whichever block is asked', () => {
     const all = [...golden, ...members];
-    const whole = drawParameters(all, [dirichlet], settings({ plan }), 0, 1000);
-    const block = drawParameters(all, [dirichlet], settings({ plan }), 250, 500);
+    const whole = drawParameters(all, [dirichlet], settings({ plan }), 0, 400);
+    const block = drawParameters(all, [dirichlet], settings({ plan }), 150, 300);
     expect(whole.size).toBe(all.length);
-    for (const [id, column] of block) expect(column).toEqual(whole.get(id)?.slice(250, 500));
+    for (const [id, column] of block) expect(column).toEqual(whole.get(id)?.slice(150, 300));
   });
 
   it('gives the same draws for the same seed and others for a new one', () => {
@@ -53,7 +53,7 @@ describe.each(PLANS)('drawParameters, %s plan', (plan) => {
   });
 
   it('stays inside the support and has the declared mean and variance', () => {
-    const samples = 4000;
+    const samples = 2000;
     for (const [id, column] of draw(golden, { plan, samples })) {
       const of = goldenCases.find((candidate) => candidate.id === id)?.distribution;
       if (!of) throw new Error(id);
@@ -83,7 +83,7 @@ describe.each(PLANS)('drawParameters, %s plan', (plan) => {
 
   it('gives a fixed parameter its value in every draw', () => {
     const column = draw([parameter('f', { type: 'fixed' }, 0.3)], { plan }).get('f');
-    expect(column).toEqual(new Float64Array(1000).fill(0.3));
+    expect(column).toEqual(new Float64Array(400).fill(0.3));
   });
 });
 

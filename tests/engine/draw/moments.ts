@@ -2,7 +2,9 @@
 type Column = ArrayLike<number>;
 
 export function mean(column: Column): number {
-  return Array.from(column).reduce((sum, x) => sum + x, 0) / column.length;
+  let sum = 0;
+  for (let i = 0; i < column.length; i++) sum += column[i] ?? Number.NaN;
+  return sum / column.length;
 }
 
 /** Mean squared distance from the mean. */
@@ -12,7 +14,11 @@ export function spread(column: Column): number {
 
 export function covariance(a: Column, b: Column): number {
   const [centreA, centreB] = [mean(a), mean(b)];
-  return mean(Array.from(a, (x, i) => (x - centreA) * ((b[i] ?? Number.NaN) - centreB)));
+  let sum = 0;
+  for (let i = 0; i < a.length; i++) {
+    sum += ((a[i] ?? Number.NaN) - centreA) * ((b[i] ?? Number.NaN) - centreB);
+  }
+  return sum / a.length;
 }
 
 export function correlation(a: Column, b: Column): number {
@@ -20,9 +26,9 @@ export function correlation(a: Column, b: Column): number {
 }
 
 /** Ranks from 1; for columns without ties. */
-export function ranks(column: Column): number[] {
+function ranks(column: Column): Float64Array {
   const order = Array.from(column, (_, i) => i).sort((i, j) => (column[i] ?? 0) - (column[j] ?? 0));
-  const result: number[] = new Array(column.length).fill(0);
+  const result = new Float64Array(column.length);
   order.forEach((i, rank) => {
     result[i] = rank + 1;
   });

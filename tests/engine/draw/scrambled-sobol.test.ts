@@ -59,12 +59,13 @@ describe('the Sobol plan for 30 parameters', () => {
   it.each([200, 512, 800, 1000, 1024])('correlates no two of them in %i draws', (samples) => {
     for (const seed of [1, 2, 3]) {
       const drawn = columns('sobol', seed, samples);
+      let worst = 0;
       for (let i = 0; i < drawn.length; i++) {
         for (let j = 0; j < i; j++) {
-          const r = correlation(drawn[i] ?? [], drawn[j] ?? []);
-          expect(Math.abs(r), `${i} and ${j}`).toBeLessThan(4.5 / Math.sqrt(samples));
+          worst = Math.max(worst, Math.abs(correlation(drawn[i] ?? [], drawn[j] ?? [])));
         }
       }
+      expect(worst, `seed ${seed}`).toBeLessThan(4.5 / Math.sqrt(samples));
     }
   });
 });
