@@ -53,8 +53,6 @@ const own: Record<string, Lower> = {
       graph.binary('multiply', lnOneMinus(graph, p!), graph.binary('divide', to!, from!)),
     ),
   odds: (graph, [p]) => graph.binary('divide', p!, oneMinus(graph, p!)),
-  chance_of: (graph, [odds]) =>
-    graph.binary('divide', odds!, graph.binary('add', graph.constant(1), odds!)),
   log_odds: (graph, [p]) =>
     graph.binary('subtract', graph.unary('ln', p!), lnOneMinus(graph, p!)),
   chance_of_log_odds: (graph, [x]) => {
