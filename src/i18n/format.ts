@@ -84,7 +84,7 @@ export function formatPercent(share: number, language: Language): string {
 
 function moneyDecimals(value: number): number {
   const size = Math.abs(value);
-  if (size === 0 || size >= 100) return 0;
+  if (Number.isInteger(value) || size >= 100) return 0;
   return size >= 10 ? 1 : 2;
 }
 

@@ -97,7 +97,7 @@ function ProbabilityCell({ now, was, run, language }: AnswerStripProps) {
     <Cell label={t('strip.probability')} was={before}>
       <Figure name="probabilityBest" value={probabilityBest.value}>
         {words(now.chances)}
-      </Figure>
+      </Figure>{' '}
       <MonteCarlo estimate={probabilityBest} decimals={2} language={language} />
     </Cell>
   );
@@ -122,7 +122,7 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
     <Cell label={t('strip.evpi')} was={before}>
       <Figure name="evpi" value={evpi.value}>
         {words(now.chances)}
-      </Figure>
+      </Figure>{' '}
       <MonteCarlo estimate={evpi} decimals={decimalsFor(evpi)} language={language} />
       {populationEvpi && (
         <Small>
@@ -149,7 +149,7 @@ function MonteCarlo(props: { estimate: Estimate; decimals: number; language: Lan
   });
   return (
     <span
-      className="ml-2 text-sm font-normal whitespace-nowrap text-mute"
+      className="ml-1 text-sm font-normal whitespace-nowrap text-mute"
       title={t('strip.monteCarlo')}
     >
       ± {shown}
@@ -160,7 +160,7 @@ function MonteCarlo(props: { estimate: Estimate; decimals: number; language: Lan
 /** As many decimals as the first figure of the error takes. */
 function decimalsFor({ standardError }: Estimate): number {
   if (!standardError) return 0;
-  return Math.min(4, Math.max(0, -Math.floor(Math.log10(standardError))));
+  return Math.min(2, Math.max(0, -Math.floor(Math.log10(standardError))));
 }
 
 function Cell(props: { label: string; was?: string | null | undefined; children: ReactNode }) {

@@ -51,10 +51,11 @@ export function Beam(props: BeamProps) {
   const health = amountOnPoise(pair.incrementalHealth, language);
   const hookWord = t(`beam.plate.${lever.hook === 'lift' ? 'saved' : 'cost'}`);
   const poiseWord = t(`beam.plate.${lever.poise === 'loss' ? 'healthLost' : 'health'}`);
+  const poiseWidth = plate(poiseWord, health);
   const plateWidth = plate(hookWord, cost);
   const layout = beamLayout(width, scale.max, segments, names, {
-    width: plateWidth,
-    lifts: lever.hook === 'lift',
+    plate: { width: plateWidth, lifts: lever.hook === 'lift' },
+    poiseWidth,
   });
   const { fulcrum, height, maxAngle } = layout;
   const angle = lever.tilt * maxAngle;
@@ -131,7 +132,7 @@ export function Beam(props: BeamProps) {
               loss={lever.poise === 'loss'}
               word={poiseWord}
               amount={health}
-              width={plate(poiseWord, health)}
+              width={poiseWidth}
             />
           </g>
           <text

@@ -7,6 +7,7 @@ import {
   LIFT_RISE,
   PLATE_HEIGHT,
   POISE_DROP,
+  POISE_FLARE,
   POISE_HEIGHT,
 } from './layout.ts';
 
@@ -56,7 +57,7 @@ interface PoiseProps extends Hanging {
 export function Poise({ layout, angle, moving, x, loss, word, amount, width }: PoiseProps) {
   const half = width / 2;
   const top = POISE_DROP;
-  const shape = `M${-half} ${top} H${half} L${half + 7} ${top + POISE_HEIGHT - 8} Q0 ${top + POISE_HEIGHT + 8} ${-half - 7} ${top + POISE_HEIGHT - 8} Z`;
+  const shape = `M${-half} ${top} H${half} L${half + POISE_FLARE} ${top + POISE_HEIGHT - 8} Q0 ${top + POISE_HEIGHT + 8} ${-half - POISE_FLARE} ${top + POISE_HEIGHT - 8} Z`;
   return (
     <g className={moving} style={{ transform: `translate(${x}px, ${layout.fulcrum.y}px)` }}>
       <rect x="-6" y="-13" width="12" height="26" rx="2" fill="var(--brass)" />

@@ -40,21 +40,29 @@ export const FOOT = STAND + 24;
 /** How far above the arm's middle the top of a lifting load is. */
 export const LIFT_RISE = PLATE_HEIGHT + 22;
 
+/** How much wider the poise is at its foot, on each side. */
+export const POISE_FLARE = 7;
+
 const ROW = 20;
-const MARGIN = 12;
+
+export interface Loads {
+  /** What hangs on the hook: its width, and whether it lifts. */
+  readonly plate: { readonly width: number; readonly lifts: boolean };
+  readonly poiseWidth: number;
+}
 
 export function beamLayout(
   width: number,
   max: number,
   segments: readonly FrontierSegment[],
   names: ReadonlyMap<string, string>,
-  plate: { readonly width: number; readonly lifts: boolean },
+  { plate, poiseWidth }: Loads,
 ): BeamLayout {
   const wide = width >= 640;
   const hookX = plate.width / 2 + 2;
   const plateEnd = hookX + plate.width / 2;
   const fulcrumX = plateEnd + (wide ? 28 : 16);
-  const endX = width - MARGIN - (wide ? 16 : 8);
+  const endX = width - poiseWidth / 2 - POISE_FLARE - 2;
   const room = endX - fulcrumX;
   const drop = wide ? 48 : 26;
   const xOf = (threshold: number) => fulcrumX + (Math.min(threshold, max) / max) * room;
