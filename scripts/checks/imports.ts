@@ -7,8 +7,8 @@ export interface Import {
 }
 
 /**
- * Everything a file imports: static, re-exported, type-only, dynamic, and workers
- * or files named by `new URL('...', import.meta.url)`.
+ * Every module a file imports: static, re-exported, type-only, dynamic, and workers
+ * named by `new URL('...', import.meta.url)`.
  */
 export function importsOf(file: SourceFile): Import[] {
   const { module } = parseSource(file);
@@ -24,7 +24,8 @@ export function importsOf(file: SourceFile): Import[] {
   return distinct([...written, ...urlsOf(file)]);
 }
 
-const URL_OF_MODULE = /new URL\(\s*['"`]([^'"`]+)['"`]\s*,\s*import\.meta\.url/g;
+/** Of a module, such as a worker's; a folder or a data file is no import. */
+const URL_OF_MODULE = /new URL\(\s*['"`]([^'"`]+\.[mc]?[jt]sx?)['"`]\s*,\s*import\.meta\.url/g;
 
 function urlsOf(file: SourceFile): Import[] {
   return [...file.text.matchAll(URL_OF_MODULE)].map((match) => ({

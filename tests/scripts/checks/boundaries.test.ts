@@ -37,6 +37,7 @@ it.each([
   ['src/features/beam/beam.tsx', `import { angle } from './angle.ts';`],
   ['server/db.ts', `import { hub } from '../shared/db/hub.ts'; import fs from 'node:fs';`],
   ['server/version.ts', `import data from '../package.json' with { type: 'json' };`],
+  ['server/main.ts', `const dist = new URL('../dist', import.meta.url);`],
   ['shared/export/r.ts', `import { psa } from '../analysis/psa.ts';`],
   ['shared/db/hub.ts', `import { text } from 'drizzle-orm/sqlite-core';`],
   ['shared/cli/appraise.ts', `import fs from 'node:fs'; import '../export/r.ts';`],
