@@ -10,11 +10,11 @@ import { DocumentError, error, type Issue } from '../model/issue.ts';
 import { type Accounts, openAccounts } from './accounts.ts';
 import { checkModel } from './check.ts';
 import { type CompiledModel, compile } from './compile.ts';
+import { detailTallies, readDetail } from './detail.ts';
 import { drawParameters } from './draw/draw.ts';
 import { plainKernels } from './kernels/plain.ts';
-import { detailTallies, readDetail } from './detail.ts';
 import { mergeProblems, ProblemLog } from './problems.ts';
-import { BLOCK_DRAWS, type BaseRun, type DrawsBlock, type SamplingSettings } from './results.ts';
+import { type BaseRun, BLOCK_DRAWS, type DrawsBlock, type SamplingSettings } from './results.ts';
 import { schedule } from './schedule.ts';
 import { type Listener, Simulator } from './simulate.ts';
 
@@ -153,4 +153,3 @@ function notFinite(
     return [{ code: 'run.notFinite', severity: 'warning', path: ['strategies', index], params }];
   });
 }
-

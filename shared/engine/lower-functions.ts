@@ -41,8 +41,7 @@ const own: Record<string, Lower> = {
   max: chained('max'),
   sum: chained('add'),
   product: chained('multiply'),
-  clamp: (graph, [x, low, high]) =>
-    graph.binary('min', graph.binary('max', x!, low!), high!),
+  clamp: (graph, [x, low, high]) => graph.binary('min', graph.binary('max', x!, low!), high!),
   chance: (graph, [rate, years]) =>
     oneMinusExp(graph, graph.unary('negate', graph.binary('multiply', rate!, years!))),
   hazard: (graph, [p, years]) =>
@@ -53,8 +52,7 @@ const own: Record<string, Lower> = {
       graph.binary('multiply', lnOneMinus(graph, p!), graph.binary('divide', to!, from!)),
     ),
   odds: (graph, [p]) => graph.binary('divide', p!, oneMinus(graph, p!)),
-  log_odds: (graph, [p]) =>
-    graph.binary('subtract', graph.unary('ln', p!), lnOneMinus(graph, p!)),
+  log_odds: (graph, [p]) => graph.binary('subtract', graph.unary('ln', p!), lnOneMinus(graph, p!)),
   chance_of_log_odds: (graph, [x]) => {
     const odds = graph.unary('exp', graph.unary('negate', x!));
     return graph.binary('divide', graph.constant(1), graph.binary('add', graph.constant(1), odds));
@@ -69,12 +67,13 @@ const own: Record<string, Lower> = {
   competing: (graph, [rate, total, years]) =>
     graph.binary('multiply', rate!, graph.binary('exposure', total!, years!)),
   alive_exponential: (graph, [time, rate]) =>
-    graph.unary(
-      'exp',
-      graph.unary('negate', graph.binary('multiply', rate!, since(graph, time!))),
-    ),
+    graph.unary('exp', graph.unary('negate', graph.binary('multiply', rate!, since(graph, time!)))),
   alive_weibull: (graph, [time, shape, scale]) => {
-    const scaled = graph.binary('power', graph.binary('divide', since(graph, time!), scale!), shape!);
+    const scaled = graph.binary(
+      'power',
+      graph.binary('divide', since(graph, time!), scale!),
+      shape!,
+    );
     return graph.unary('exp', graph.unary('negate', scaled));
   },
 };

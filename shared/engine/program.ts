@@ -69,7 +69,11 @@ export interface Program {
   /** Draws that a column holds. */
   readonly width: number;
   readonly constants: readonly { readonly at: number; readonly value: number }[];
-  readonly parameters: readonly { readonly index: number; readonly at: number; readonly wide: boolean }[];
+  readonly parameters: readonly {
+    readonly index: number;
+    readonly at: number;
+    readonly wide: boolean;
+  }[];
   readonly covariates: readonly { readonly index: number; readonly at: number }[];
   readonly clocks: { readonly cycle: number; readonly boundary: number };
   /** Run once a block of draws. */

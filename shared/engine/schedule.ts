@@ -189,7 +189,9 @@ class Scheduler {
     for (const node of own) this.layout.place(node, kept);
     const leaves = [...nodes].filter((node) => this.leafStage(node) === name);
     return {
-      instructions: own.filter((node) => this.isComputed(node)).map((node) => this.layout.instruction(node)),
+      instructions: own
+        .filter((node) => this.isComputed(node))
+        .map((node) => this.layout.instruction(node)),
       checks: this.checksOf([...leaves, ...own]),
     };
   }

@@ -23,7 +23,12 @@ describe('appraise', () => {
 
   it('places each strategy on the frontier and takes its net benefit', () => {
     const [usual, treatment] = appraised().strategies;
-    expect(usual).toMatchObject({ id: 'usual', name: 'Usual care', status: 'reference', icer: null });
+    expect(usual).toMatchObject({
+      id: 'usual',
+      name: 'Usual care',
+      status: 'reference',
+      icer: null,
+    });
     const { cost, outcome, icer, against, nmb } = treatment!;
     expect(against).toBe('usual');
     expect(icer).toBeCloseTo(cost / (outcome - usual!.outcome), 8);
@@ -55,7 +60,11 @@ describe('appraise', () => {
 
   it('turns an outcome of which fewer is better, in its ranking and not in its numbers', () => {
     const tiny = tinyDocument();
-    const outcome = { ...tiny.question.outcome, measure: 'natural', direction: 'fewerIsBetter' } as const;
+    const outcome = {
+      ...tiny.question.outcome,
+      measure: 'natural',
+      direction: 'fewerIsBetter',
+    } as const;
     const result = appraised({ ...tiny, question: { ...tiny.question, outcome } });
     const [usual, treatment] = result.strategies;
     expect(treatment!.outcome).toBeGreaterThan(usual!.outcome);
@@ -68,7 +77,13 @@ describe('appraise', () => {
 
   it('scales the value of perfect information to those whom it concerns', () => {
     const tiny = tinyDocument();
-    const beneficiaries = { label: 'Adults', incidence: 100, prevalent: 50, years: 2, discountRate: 0 };
+    const beneficiaries = {
+      label: 'Adults',
+      incidence: 100,
+      prevalent: 50,
+      years: 2,
+      discountRate: 0,
+    };
     const { evpi } = appraised({ ...tiny, question: { ...tiny.question, beneficiaries } }).psa!;
     expect(evpi.population).toBeCloseTo(evpi.perPerson * 250, 6);
     expect(appraised().psa!.evpi.population).toBeNull();

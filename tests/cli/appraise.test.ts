@@ -4,8 +4,8 @@ import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import golden from '../golden/cohort.json' with { type: 'json' };
 import { tinyDocument } from '../fixtures/tiny-document.ts';
+import golden from '../golden/cohort.json' with { type: 'json' };
 
 let folder: string;
 beforeAll(() => {
@@ -48,7 +48,16 @@ describe('appraise', () => {
   it("runs a model file of one's own, with trace and draws", { timeout: 60_000 }, () => {
     const path = fileOf(JSON.stringify(tinyDocument()));
     const csv = join(folder, 'draws.csv');
-    const { json, stderr } = command(path, '--samples', '20', '--seed', '2', '--trace', '--draws', csv);
+    const { json, stderr } = command(
+      path,
+      '--samples',
+      '20',
+      '--seed',
+      '2',
+      '--trace',
+      '--draws',
+      csv,
+    );
     expect(stderr).toBe('');
     expect(json.settings).toMatchObject({ samples: 20, seed: 2, plan: 'plain', threshold: 1500 });
     expect(json.settings.states).toEqual(['alive', 'dead']);
@@ -64,7 +73,10 @@ describe('appraise', () => {
 
   it('answers a broken document with coded messages and exit code 2', { timeout: 120_000 }, () => {
     const tiny = tinyDocument();
-    const remainder = { ...tiny, variables: [{ ...tiny.variables[0], formula: 'times_risk(p_die, 20)' }] };
+    const remainder = {
+      ...tiny,
+      variables: [{ ...tiny.variables[0], formula: 'times_risk(p_die, 20)' }],
+    };
     const cyclic = { ...tiny, variables: [{ ...tiny.variables[0], formula: 'die_now + 1' }] };
     const cases: [string, RegExp][] = [
       [JSON.stringify(tiny).slice(0, 400), /document\.notJson/],
@@ -82,8 +94,14 @@ describe('appraise', () => {
   });
 
   it('says what is wrong with the command itself', { timeout: 60_000 }, () => {
-    expect(command('nowhere.json')).toMatchObject({ status: 2, stderr: expect.stringMatching(/command\.noSuchFile/) });
-    expect(command('--samples')).toMatchObject({ status: 2, stderr: expect.stringMatching(/Usage/) });
+    expect(command('nowhere.json')).toMatchObject({
+      status: 2,
+      stderr: expect.stringMatching(/command\.noSuchFile/),
+    });
+    expect(command('--samples')).toMatchObject({
+      status: 2,
+      stderr: expect.stringMatching(/Usage/),
+    });
     expect(command('--help')).toMatchObject({ status: 0 });
   });
 });

@@ -6,7 +6,9 @@ const codes = (...args: string[]) => parseOptions(args).issues.map(({ code }) =>
 describe('parseOptions', () => {
   it('reads a file and every option', () => {
     const { options } = parseOptions(
-      'm.json --samples 50 --seed 7 --plan lhs --threshold 12.5 --scenario s --trace --draws d.csv'.split(' '),
+      'm.json --samples 50 --seed 7 --plan lhs --threshold 12.5 --scenario s --trace --draws d.csv'.split(
+        ' ',
+      ),
     );
     expect(options).toEqual({
       file: 'm.json',

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { boundaryWeights, countingWeights } from '../../shared/engine/counting.ts';
-import golden from '../golden/cohort.json' with { type: 'json' };
 import { tinyDocument } from '../fixtures/tiny-document.ts';
+import golden from '../golden/cohort.json' with { type: 'json' };
 
 const { question } = tinyDocument();
 

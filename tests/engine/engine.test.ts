@@ -34,13 +34,22 @@ describe('prepare', () => {
       { id: 'old', label: 'Old', share: 0.75, covariates: { start_age: 60 } },
     ];
     const variables: ModelDocument['variables'] = [
-      { ...tiny.variables[0]!, formula: { byStrategy: { treatment: 'p_die * rr_die * age / 100' }, otherwise: 'p_die * age / 100' } },
+      {
+        ...tiny.variables[0]!,
+        formula: {
+          byStrategy: { treatment: 'p_die * rr_die * age / 100' },
+          otherwise: 'p_die * age / 100',
+        },
+      },
     ];
     for (const run of prepare({ ...tiny, profiles, variables }).base().strategies) {
       for (const measure of ['cost', 'outcome'] as const) {
         const parts = run.byPayoff.filter((part) => part.measure === measure);
         expect(parts.reduce((sum, { total }) => sum + total, 0)).toBeCloseTo(run[measure], 12);
-        const weighted = run.byProfile.reduce((sum, part, k) => sum + profiles[k]!.share * part[measure], 0);
+        const weighted = run.byProfile.reduce(
+          (sum, part, k) => sum + profiles[k]!.share * part[measure],
+          0,
+        );
         expect(weighted).toBeCloseTo(run[measure], 12);
       }
     }
@@ -49,7 +58,11 @@ describe('prepare', () => {
   it('gives the same draws whatever blocks are asked for (T49)', () => {
     const engine = prepare(tinyDocument());
     const whole = engine.draws(settings, 0, settings.samples);
-    for (const [from, to] of [[0, BLOCK_DRAWS], [BLOCK_DRAWS, settings.samples], [7, 9]] as const) {
+    for (const [from, to] of [
+      [0, BLOCK_DRAWS],
+      [BLOCK_DRAWS, settings.samples],
+      [7, 9],
+    ] as const) {
       const part = engine.draws(settings, from, to);
       part.cost.forEach((column, s) => {
         expect([...column]).toEqual([...whole.cost[s]!.subarray(from, to)]);
@@ -59,7 +72,9 @@ describe('prepare', () => {
       });
     }
     const again = prepare(tinyDocument()).draws(settings, 0, settings.samples);
-    expect(again.cost.map((column) => [...column])).toEqual(whole.cost.map((column) => [...column]));
+    expect(again.cost.map((column) => [...column])).toEqual(
+      whole.cost.map((column) => [...column]),
+    );
   });
 
   it('gives in a draw what the base case gives at its values', () => {
@@ -71,10 +86,12 @@ describe('prepare', () => {
         ...parameter,
         value: values.get(parameter.id)![draw]!,
       }));
-      prepare({ ...tiny, parameters }).base().strategies.forEach((run, s) => {
-        expect(draws.cost[s]![draw]).toBeCloseTo(run.cost, 9);
-        expect(draws.outcome[s]![draw]).toBeCloseTo(run.outcome, 12);
-      });
+      prepare({ ...tiny, parameters })
+        .base()
+        .strategies.forEach((run, s) => {
+          expect(draws.cost[s]![draw]).toBeCloseTo(run.cost, 9);
+          expect(draws.outcome[s]![draw]).toBeCloseTo(run.outcome, 12);
+        });
     }
   });
 
@@ -117,6 +134,10 @@ describe('prepare', () => {
     const engine = prepare({ ...tiny, payoffs });
     expect(engine.base().problems.map(({ code }) => code)).toContain('run.notFinite');
     const { problems } = engine.draws({ ...settings, samples: 4 }, 0, 4);
-    expect(problems[0]).toMatchObject({ code: 'run.notFinite', severity: 'warning', params: { count: 4, draw: 0 } });
+    expect(problems[0]).toMatchObject({
+      code: 'run.notFinite',
+      severity: 'warning',
+      params: { count: 4, draw: 0 },
+    });
   });
 });

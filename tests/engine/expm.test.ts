@@ -46,17 +46,40 @@ describe('transitionMatrix', () => {
   });
 
   it('is the identity where nothing moves', () => {
-    expect(transitionMatrix([[0, 0], [0, 0]], 5)).toEqual([[1, 0], [0, 1]]);
+    expect(
+      transitionMatrix(
+        [
+          [0, 0],
+          [0, 0],
+        ],
+        5,
+      ),
+    ).toEqual([
+      [1, 0],
+      [0, 1],
+    ]);
   });
 
   it('gives NaN for a rate that is no number', () => {
-    expect(transitionMatrix([[0, Number.NaN], [0, 0]], 1)[0]).toEqual([Number.NaN, Number.NaN]);
+    expect(
+      transitionMatrix(
+        [
+          [0, Number.NaN],
+          [0, 0],
+        ],
+        1,
+      )[0],
+    ).toEqual([Number.NaN, Number.NaN]);
   });
 });
 
 describe('Exponential', () => {
   it('gives one row as it gives all', () => {
-    const places = [[0, 1], [1, 2], [2, 0]] as const;
+    const places = [
+      [0, 1],
+      [1, 2],
+      [2, 0],
+    ] as const;
     const rates = Float64Array.of(0.4, 1.3, 0.2);
     const all = Float64Array.from(new Exponential(3, places).compute(rates, 2));
     const one = new Exponential(3, places).compute(rates, 2, 1);

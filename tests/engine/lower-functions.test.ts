@@ -16,7 +16,12 @@ describe('LOWER', () => {
       if (!meaning || !known) continue;
       const values = ARGUMENTS.slice(0, Math.min(known.max, ARGUMENTS.length));
       const graph = new Graph();
-      const got = graph.valueOf(lower(graph, values.map((value) => graph.constant(value))));
+      const got = graph.valueOf(
+        lower(
+          graph,
+          values.map((value) => graph.constant(value)),
+        ),
+      );
       const want = meaning(...values);
       compared++;
       expect(got, `${name}(${values})`).toBeDefined();

@@ -15,7 +15,8 @@ describe('operations', () => {
       const want = named(name);
       if (!want) continue;
       for (const a of values) {
-        for (const b of values) expect([name, a, b, meaning(a, b)]).toEqual([name, a, b, want(a, b)]);
+        for (const b of values)
+          expect([name, a, b, meaning(a, b)]).toEqual([name, a, b, want(a, b)]);
       }
     }
   });

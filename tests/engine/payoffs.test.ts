@@ -4,7 +4,10 @@ import type { ModelDocument, Payoff } from '../../shared/model/document.ts';
 import { tinyDocument } from '../fixtures/tiny-document.ts';
 
 /** Cost of usual care with the one payoff, undiscounted unless a rate is given. */
-function costOf(payoff: Partial<Payoff> & { type: Payoff['type'] }, question: Partial<ModelDocument['question']> = {}) {
+function costOf(
+  payoff: Partial<Payoff> & { type: Payoff['type'] },
+  question: Partial<ModelDocument['question']> = {},
+) {
   const tiny = tinyDocument();
   const discounting = { costs: 0, outcomes: 0, at: 'counted' as const, wholeYears: false };
   const whole = { id: 'x', label: 'X', measure: 'cost', category: 'X', ...payoff } as Payoff;

@@ -43,7 +43,10 @@ describe('mergeProblems', () => {
   };
 
   it('adds up counts and keeps the first draw, in whatever order blocks come', () => {
-    for (const blocks of [[block(0, 2), block(125, 3)], [block(125, 3), block(0, 2)]]) {
+    for (const blocks of [
+      [block(0, 2), block(125, 3)],
+      [block(125, 3), block(0, 2)],
+    ]) {
       expect(mergeProblems(blocks)).toMatchObject([{ params: { count: 5, draw: 0 } }]);
     }
   });

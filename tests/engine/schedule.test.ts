@@ -82,7 +82,10 @@ describe('schedule', () => {
 
   it('gives no place twice while it is in use', () => {
     const program = programOf('p_die * age / 100', 3);
-    for (const { operation, out, args } of [...program.once.instructions, ...program.profileTape.instructions]) {
+    for (const { operation, out, args } of [
+      ...program.once.instructions,
+      ...program.profileTape.instructions,
+    ]) {
       if (operation.op === 'spread') expect(args[0]!.base).not.toBe(out.base);
       expect(out.base).toBeLessThan(program.size);
     }

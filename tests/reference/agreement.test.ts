@@ -5,7 +5,7 @@
  */
 import { describe, expect, it } from 'vitest';
 import { drawParameters } from '../../shared/engine/draw/draw.ts';
-import { prepare } from '../../shared/engine/engine.ts';
+import { type Engine, prepare } from '../../shared/engine/engine.ts';
 import type { ModelDocument } from '../../shared/model/document.ts';
 import { differences, differs, sizes } from './compare.ts';
 import { randomModel } from './random-model.ts';
@@ -16,18 +16,18 @@ const MODELS = Number(process.env.REFERENCE_MODELS ?? 300);
 const BATCH = 20;
 const PLANS = ['plain', 'lhs', 'sobol'] as const;
 
-function baseDisagreements(document: ModelDocument): string[] {
-  const run = prepare(document).base({ trace: true });
+function baseDisagreements(engine: Engine, document: ModelDocument): string[] {
+  const run = engine.base({ trace: true });
   const want = simulate(document, baseValues(document));
   const codes = run.problems.map(({ code }) => code);
   return [...codes, ...differences(document, run.strategies, want)];
 }
 
 /** Three draws from the middle of a plan. */
-function drawDisagreements(document: ModelDocument, seed: number): string[] {
+function drawDisagreements(engine: Engine, document: ModelDocument, seed: number): string[] {
   const settings = { samples: 12, seed, plan: PLANS[seed % 3] as (typeof PLANS)[number] };
   const [from, to] = [5, 8];
-  const block = prepare(document).draws(settings, from, to);
+  const block = engine.draws(settings, from, to);
   const { parameters, groups } = document;
   const drawn = drawParameters(parameters, groups, settings, from, to);
   const found = block.problems.map(({ code }) => code);
@@ -55,8 +55,9 @@ describe('engine and reference agree', () => {
     it(`on random models of seeds ${first} to ${last}`, { timeout: 120_000 }, () => {
       for (let seed = first; seed <= last; seed++) {
         const document = randomModel(seed);
-        expect(baseDisagreements(document), `seed ${seed}, base case`).toEqual([]);
-        expect(drawDisagreements(document, seed), `seed ${seed}, draws`).toEqual([]);
+        const engine = prepare(document);
+        expect(baseDisagreements(engine, document), `seed ${seed}, base case`).toEqual([]);
+        expect(drawDisagreements(engine, document, seed), `seed ${seed}, draws`).toEqual([]);
       }
     });
   }

@@ -1,9 +1,10 @@
 /**
- * Every simulator here gives the numbers of tests/golden/cohort*.json, made with
+ * Engine and reference both give the numbers of tests/golden/cohort*.json, made with
  * base R 4.2.2 (see tests/golden/README.md, whose tolerances are used): traces and
  * totals by all seven counting conventions, discounted and not.
  */
 import { describe, expect, it } from 'vitest';
+import { prepare } from '../../shared/engine/engine.ts';
 import type { ModelDocument } from '../../shared/model/document.ts';
 import cohort from '../golden/cohort.json' with { type: 'json' };
 import golden1 from '../golden/cohort_model1.json' with { type: 'json' };
@@ -27,6 +28,11 @@ type Simulator = (document: ModelDocument) => readonly Run[];
 
 const SIMULATORS: Record<string, Simulator> = {
   reference: (document) => simulate(document, baseValues(document)),
+  engine: (document) => {
+    const { strategies, problems } = prepare(document).base({ trace: true });
+    expect(problems).toEqual([]);
+    return strategies.map((run) => ({ ...run, trace: run.trace ?? [] }));
+  },
 };
 
 /** Relative to max(1, |want|), as tests/golden/README.md says. */
@@ -229,7 +235,7 @@ function geometric(simulator: Simulator, z: { p: number; r: number; N: number },
     near(got.lifeYears, want[`ly_${convention}`] as number, 1e-10, convention);
     near(got.outcome, want[`ly_disc_${convention}`] as number, 1e-10, `${convention} discounted`);
   }
-  const forever = { cycles: Math.ceil(36 / z.p), dt: 1, rC: 0, rO: z.r, matrix };
+  const forever = { cycles: Math.ceil(26 / z.p), dt: 1, rC: 0, rO: z.r, matrix };
   const [got] = simulator(chainModel(forever)) as [Run];
   near(got.lifeYears, want.ly_infinite_start as number, 1e-10, 'for ever');
   near(got.outcome, want.ly_disc_infinite_start as number, 1e-10, 'for ever, discounted');

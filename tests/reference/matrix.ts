@@ -6,43 +6,35 @@ export function zeros(size: number): Matrix {
   return Array.from({ length: size }, () => new Array<number>(size).fill(0));
 }
 
-export function identity(size: number): Matrix {
-  return Array.from({ length: size }, (_, i) =>
-    Array.from({ length: size }, (_, j) => (i === j ? 1 : 0)),
-  );
+/** A row vector times a matrix. */
+function times(row: readonly number[], matrix: Matrix): number[] {
+  const sums = new Array<number>(row.length).fill(0);
+  row.forEach((factor, k) => {
+    const other = matrix[k] as number[];
+    for (let j = 0; j < sums.length; j++)
+      sums[j] = (sums[j] as number) + factor * (other[j] as number);
+  });
+  return sums;
 }
 
-export function multiply(a: Matrix, b: Matrix): Matrix {
-  return a.map((row) => {
-    const sums = new Array<number>(row.length).fill(0);
-    for (let k = 0; k < row.length; k++) {
-      const factor = row[k] as number;
-      const other = b[k] as number[];
-      if (factor === 0) continue;
-      for (let j = 0; j < row.length; j++) {
-        sums[j] = (sums[j] as number) + factor * (other[j] as number);
-      }
-    }
-    return sums;
-  });
-}
+/** Enough terms of 1/n! for the last to vanish beside 1. */
+const TERMS = 20;
 
 /**
- * Matrix exponential: Taylor's series of the matrix halved until its entries are
- * small, then squared as often (scaling and squaring; Moler and Van Loan 2003,
- * SIAM Review 45, method 3, from memory).
+ * Row i of the matrix exponential: the unit vector i moved in steps so short that
+ * Taylor's series of each converges at once.
  */
-export function exponential(matrix: Matrix): Matrix {
+export function exponentialRow(matrix: Matrix, i: number): number[] {
   const norm = Math.max(...matrix.map((row) => row.reduce((sum, x) => sum + Math.abs(x), 0)));
-  let halvings = 0;
-  while (norm / 2 ** halvings > 0.25) halvings++;
-  const small = matrix.map((row) => row.map((x) => x / 2 ** halvings));
-  let term = identity(matrix.length);
-  let sum = term;
-  for (let n = 1; n <= 14; n++) {
-    term = multiply(term, small).map((row) => row.map((x) => x / n));
-    sum = sum.map((row, i) => row.map((x, j) => x + ((term[i] as number[])[j] as number)));
+  const steps = Math.max(1, Math.ceil(norm));
+  const short = matrix.map((row) => row.map((x) => x / steps));
+  let moved: number[] = matrix.map((_, j) => (i === j ? 1 : 0));
+  for (let step = 0; step < steps; step++) {
+    let term: number[] = moved;
+    for (let n = 1; n <= TERMS; n++) {
+      term = times(term, short).map((x) => x / n);
+      moved = moved.map((x, j) => x + (term[j] as number));
+    }
   }
-  for (; halvings > 0; halvings--) sum = multiply(sum, sum);
-  return sum;
+  return moved;
 }

@@ -1,7 +1,7 @@
 /** Movements of one cycle, as a matrix over sub-states (the tunnels of timed states). */
 import type { ModelDocument, Row } from '../../shared/model/document.ts';
 import { evaluate, type Moment, type Setting } from './evaluate.ts';
-import { exponential, type Matrix, zeros } from './matrix.ts';
+import { exponentialRow, type Matrix, zeros } from './matrix.ts';
 
 /** A tunnel of a timed state; ordinary and absorbing states have tunnel 0 only. */
 export interface SubState {
@@ -115,7 +115,9 @@ function generated(own: Row, setting: Setting, moment: Moment): Map<string, numb
       line[i] = (line[i] as number) - rate;
     }
   });
-  const moved = exponential(generator.map((line) => line.map((x) => x * question.cycleLength)));
-  const chances = moved[states.findIndex((each) => each.id === own.from)] as number[];
+  const chances = exponentialRow(
+    generator.map((line) => line.map((x) => x * question.cycleLength)),
+    states.findIndex((each) => each.id === own.from),
+  );
   return new Map(states.map((state, j) => [state.id, chances[j] as number]));
 }

@@ -12,19 +12,19 @@ type VariableInput = NonNullable<DocumentInput['variables']>[number];
 const list = (random: Seeded, count: number, low: number, high: number): number[] =>
   Array.from({ length: count }, () => random.between(low, high));
 
-/** Distributions on (0, 1). */
+/** Distributions on (0, 1) that can give any value from 0.2 to 0.25. */
 function unitDistribution(random: Seeded): DistributionInput {
   return random.pick<DistributionInput>([
     { type: 'beta', alpha: random.between(2, 30), beta: random.between(5, 80) },
     { type: 'uniform', low: random.between(0.01, 0.2), high: random.between(0.25, 0.7) },
     { type: 'triangular', low: 0.02, mode: random.between(0.05, 0.3), high: 0.6 },
     { type: 'pert', low: 0.05, mode: random.between(0.1, 0.4), high: 0.8 },
-    { type: 'empirical', values: list(random, 20, 0.05, 0.6) },
+    { type: 'empirical', values: [0.05, ...list(random, 20, 0.05, 0.6), 0.6] },
     { type: 'fixed' },
   ]);
 }
 
-/** Distributions above 0 with a mean near `middle`. */
+/** Distributions above 0 that can give `middle`, and most often values near it. */
 function positiveDistribution(random: Seeded, middle: number): DistributionInput {
   const shape = random.between(4, 40);
   const low = middle / 2;
@@ -39,7 +39,7 @@ function positiveDistribution(random: Seeded, middle: number): DistributionInput
     { type: 'uniform', low, high: 2 * middle },
     { type: 'triangular', low, mode: middle, high: 2 * middle },
     { type: 'pert', low, mode: middle, high: 2 * middle },
-    { type: 'empirical', values: list(random, 15, low, 2 * middle) },
+    { type: 'empirical', values: [middle, ...list(random, 15, low, 2 * middle)] },
     { type: 'fixed' },
   ]);
 }
@@ -59,7 +59,7 @@ function randomParameter(random: Seeded, sort: Sort, symbol: string): ParameterI
     return parameter(symbol, mean, distribution, sort);
   }
   if (sort === 'probability' || sort === 'utility') {
-    return parameter(symbol, random.between(0.05, 0.6), unitDistribution(random), sort);
+    return parameter(symbol, random.between(0.2, 0.25), unitDistribution(random), sort);
   }
   const middle = random.between(...MIDDLES[sort]);
   return parameter(symbol, middle, positiveDistribution(random, middle), sort);

@@ -152,7 +152,8 @@ const ratios: readonly Form[] = [
   (w, d) => `${X(w, d)} * ${X(w, d)}`,
   (w, d) => `(1 + abs(${X(w, d)} - 1) / 2)`,
   (w, d) => `(1 + log10(1 + ${clock(w, d)}))`,
-  (w) => `(${number(w, 0.5, 1)} + ${w.flags.length > 0 ? w.random.pick(w.flags) : 'cycle_length'})`,
+  (w) =>
+    `(${number(w, 0.5, 1)} + ${w.flags.length > 0 ? w.random.pick(w.flags) : number(w, 0.1, 0.5)})`,
   (w, d) => `exp(${number(w, -0.3, 0.3)}) * ${X(w, d)}`,
 ];
 

@@ -37,7 +37,9 @@ export function randomModel(seed: number): ModelDocument {
   const named = [...evidence.words, ...look.words];
   const { variables, words } = randomVariables(random, strategies, named, flags);
   const bySurvival = random.happens(0.12);
-  const states = randomStates(random, bySurvival);
+  /** Rates that depend on time in state, in many states at once. */
+  const sojourn = !bySurvival && random.happens(0.2);
+  const states = randomStates(random, bySurvival ? 0 : sojourn ? 0.7 : 0.3);
   const asked = randomQuestion(random);
   const draft: Draft = { random, strategies, states, words, flags, cycles: asked.cycles };
   return documentOf({
@@ -50,7 +52,7 @@ export function randomModel(seed: number): ModelDocument {
     variables,
     states,
     start: bySurvival ? { remainder: 'a', shares: [] } : randomStart(draft),
-    movements: bySurvival ? randomCurves(draft) : randomRows(draft),
+    movements: bySurvival ? randomCurves(draft) : randomRows(draft, sojourn),
     payoffs: randomPayoffs(draft, bySurvival),
   });
 }
@@ -58,7 +60,7 @@ export function randomModel(seed: number): ModelDocument {
 function randomQuestion(random: Seeded) {
   const cycleLength = random.pick([1, 1, 1 / 2, 1 / 12, 7 / 365.25]);
   const counting = random.pick(['start', 'end', 'trapezoid', 'simpson'] as const);
-  const any = random.whole(2, cycleLength === 1 ? 15 : 30);
+  const any = random.whole(2, cycleLength === 1 ? 14 : 24);
   const cycles = counting === 'simpson' ? 2 * Math.ceil(any / 2) : any;
   const rate = () =>
     random.happens(0.3)
@@ -100,13 +102,13 @@ function randomProfiles(random: Seeded, flags: readonly string[]) {
 }
 
 /** `a`, `b`, ... where some know the time spent in them; the last one or two absorb. */
-function randomStates(random: Seeded, bySurvival: boolean): StateInput[] {
+function randomStates(random: Seeded, timed: number): StateInput[] {
   const count = random.whole(2, 8);
-  const ends = count > 3 && !bySurvival ? random.whole(0, 2) : 1;
+  const ends = count > 3 && timed > 0 ? random.whole(0, 2) : 1;
   return Array.from({ length: count }, (_, i) => {
     const id = String.fromCharCode(97 + i);
     if (i >= count - ends) return { id, label: id, type: 'absorbing', dead: random.happens(0.85) };
-    if (!bySurvival && random.happens(0.3)) {
+    if (random.happens(timed)) {
       return { id, label: id, type: 'timed', cycles: random.whole(1, 5) };
     }
     return { id, label: id, type: 'ordinary' };
@@ -156,18 +158,19 @@ function randomStart(draft: Draft): DocumentInput['start'] {
 
 const BASES = ['probabilities', 'generator', 'byRow', 'logit'] as const;
 
-function randomRows(draft: Draft): DocumentInput['movements'] {
+function randomRows(draft: Draft, sojourn: boolean): DocumentInput['movements'] {
   const { random, states, strategies } = draft;
-  const bases = random.happens(0.5) ? BASES : [random.pick(BASES)];
+  const some = random.happens(0.5) ? BASES : [random.pick(BASES)];
+  const bases = sojourn ? (['generator'] as const) : some;
   const rows = states
     .filter((state) => state.type !== 'absorbing')
     .flatMap(({ id }) => {
       if (strategies.length === 1 || random.happens(0.7)) {
         return [randomRow(draft, id, random.pick(bases), `from_${id}`)];
       }
-      const some = random.some(strategies, random.whole(1, strategies.length - 1));
-      const rest = strategies.filter((strategy) => !some.includes(strategy));
-      return [some, rest].map((holds, n) => ({
+      const first = random.some(strategies, random.whole(1, strategies.length - 1));
+      const rest = strategies.filter((strategy) => !first.includes(strategy));
+      return [first, rest].map((holds, n) => ({
         ...randomRow(draft, id, random.pick(bases), `from_${id}_${n}`),
         strategies: holds,
       }));
@@ -201,7 +204,7 @@ function cellsOf(draft: Draft, to: readonly string[], sort: Sort, timed: boolean
   const { random } = draft;
   const writer = writerFor(draft, timed);
   /** A predictor that would overflow if it were exponentiated as it is. */
-  const huge = sort === 'logOdds' && random.happens(0.03) ? '800 + ' : '';
+  const huge = sort === 'logOdds' && random.happens(0.08) ? '800 + ' : '';
   return to.map((state) => ({
     id: `to_${state}`,
     to: state,
@@ -243,7 +246,7 @@ const RATES = ({ words }: Writer): string[] => [
 function randomPayoffs(draft: Draft, bySurvival: boolean): PayoffInput[] {
   const { random } = draft;
   const types = bySurvival ? (['state', 'once', 'start'] as const) : ALL_TYPES;
-  const count = random.whole(2, 7);
+  const count = random.whole(3, 8);
   return Array.from({ length: count }, (_, n) => {
     const measure = n < 2 ? (['cost', 'outcome'] as const)[n] : random.pick(MEASURES);
     const type = n < 2 ? 'state' : random.pick(types);
@@ -252,7 +255,8 @@ function randomPayoffs(draft: Draft, bySurvival: boolean): PayoffInput[] {
 }
 
 const MEASURES = ['cost', 'outcome'] as const;
-const ALL_TYPES = ['state', 'movement', 'once', 'start'] as const;
+/** Movements more often, for they have the most ways to go wrong. */
+const ALL_TYPES = ['state', 'movement', 'movement', 'once', 'start'] as const;
 
 function randomPayoff(
   draft: Draft,
@@ -298,7 +302,9 @@ function statePart(draft: Draft, measure: 'cost' | 'outcome') {
 
 function movementPart(draft: Draft, measure: 'cost' | 'outcome') {
   const { random, states } = draft;
-  const from = random.happens(0.6) ? random.pick(states).id : undefined;
+  const timed = states.filter((state) => state.type === 'timed');
+  const origins = timed.length > 0 && random.happens(0.5) ? timed : states;
+  const from = random.happens(0.7) ? random.pick(origins).id : undefined;
   const others = states.filter((state) => state.id !== from);
   const to = random.happens(0.6) ? random.pick(others).id : undefined;
   const writer = writerFor(draft, isTimed(draft, from));

@@ -30,7 +30,10 @@ describe('logitChances', () => {
   }
 
   it('reports a predictor that is no number', () => {
-    const bad: Row = { ...row([0]), cells: [{ id: 'x', to: 'b', formula: 'ln(p_die - 1)' }] } as Row;
+    const bad: Row = {
+      ...row([0]),
+      cells: [{ id: 'x', to: 'b', formula: 'ln(p_die - 1)' }],
+    } as Row;
     const { problems } = afterOneCycle({ rows: [bad], states: ['a', 'b'] });
     expect(problems[0]).toMatchObject({ code: 'run.logOddsOutside', params: { value: 'NaN' } });
   });

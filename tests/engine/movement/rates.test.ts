@@ -72,7 +72,10 @@ describe('chancesByGenerator', () => {
       remainder: 'b',
       cells: [{ id: 'b_c', to: 'c', formula: '0.9' }],
     };
-    const { shares } = afterOneCycle({ rows: [row('a', { b: 0.4 }), other], states: ['a', 'b', 'c'] });
+    const { shares } = afterOneCycle({
+      rows: [row('a', { b: 0.4 }), other],
+      states: ['a', 'b', 'c'],
+    });
     expect(shares[1]).toBeCloseTo(-Math.expm1(-0.4), 14);
     expect(shares[2]).toBe(0);
   });
@@ -80,14 +83,27 @@ describe('chancesByGenerator', () => {
   it('counts two moves within a cycle', () => {
     const rows = [row('a', { b: 1 }), row('b', { c: 2 })];
     const { shares } = afterOneCycle({ rows, states: ['a', 'b', 'c'] });
-    const [want] = transitionMatrix([[0, 1, 0], [0, 0, 2], [0, 0, 0]], 1);
+    const [want] = transitionMatrix(
+      [
+        [0, 1, 0],
+        [0, 0, 2],
+        [0, 0, 0],
+      ],
+      1,
+    );
     want!.forEach((p, k) => {
       expect(shares[k]).toBeCloseTo(p, 14);
     });
   });
 
   it('reports a rate below 0', () => {
-    const { problems } = afterOneCycle({ rows: [row('a', { b: '0 - hazard(p_die, 1)' })], states: ['a', 'b'] });
-    expect(problems[0]).toMatchObject({ code: 'run.rateOutside', params: { value: expect.closeTo(Math.log(0.9), 14) } });
+    const { problems } = afterOneCycle({
+      rows: [row('a', { b: '0 - hazard(p_die, 1)' })],
+      states: ['a', 'b'],
+    });
+    expect(problems[0]).toMatchObject({
+      code: 'run.rateOutside',
+      params: { value: expect.closeTo(Math.log(0.9), 14) },
+    });
   });
 });
