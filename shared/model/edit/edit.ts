@@ -33,4 +33,9 @@ export type Edit =
       readonly before: string | null;
     }
   | { readonly type: 'remove'; readonly at: Place; readonly id: string }
-  | { readonly type: 'move'; readonly at: Place; readonly id: string; readonly before: string | null };
+  | {
+      readonly type: 'move';
+      readonly at: Place;
+      readonly id: string;
+      readonly before: string | null;
+    };
