@@ -40,24 +40,49 @@ function times(question: Question, cycle: number): { start: number; end: number;
   return { start: cycle, end: cycle + 1, move };
 }
 
+/** A weight in its two parts: how much is counted, and what it is worth today. */
+export interface Weight {
+  /** Part of the cycle's payoff that is counted at this moment, 0 to 1. */
+  readonly share: number;
+  readonly discount: number;
+}
+
+/** One cycle's weights under one discount rate; a moment that does not count has discount 1. */
+export function cycleWeights(
+  question: Question,
+  rate: DiscountRate,
+  cycle: number,
+): Record<'start' | 'end' | 'move', Weight> {
+  const { cycleLength, discounting, counting } = question;
+  const factor = (time: number) => discountFactor(rate, time * cycleLength, discounting.wholeYears);
+  const weight = (share: number, time: number): Weight => ({
+    share,
+    discount: share === 0 ? 1 : factor(time),
+  });
+  const [first, last] = shares(counting, cycle);
+  const at = times(question, cycle);
+  const move = at.move.reduce((sum, time) => sum + factor(time), 0) / at.move.length;
+  return {
+    start: weight(first, at.start),
+    end: weight(last, at.end),
+    move: { share: 1, discount: move },
+  };
+}
+
 /** Weights of all cycles under one discount rate. */
 export function countingWeights(
   question: Question,
   rate: DiscountRate,
   cycles: number,
 ): CountingWeights {
-  const { cycleLength, discounting, counting } = question;
-  const factor = (cycle: number) =>
-    discountFactor(rate, cycle * cycleLength, discounting.wholeYears);
   const start = new Float64Array(cycles);
   const end = new Float64Array(cycles);
   const move = new Float64Array(cycles);
   for (let cycle = 0; cycle < cycles; cycle++) {
-    const [first, last] = shares(counting, cycle);
-    const at = times(question, cycle);
-    start[cycle] = first === 0 ? 0 : first * factor(at.start);
-    end[cycle] = last === 0 ? 0 : last * factor(at.end);
-    move[cycle] = at.move.reduce((sum, time) => sum + factor(time), 0) / at.move.length;
+    const weights = cycleWeights(question, rate, cycle);
+    start[cycle] = weights.start.share * weights.start.discount;
+    end[cycle] = weights.end.share * weights.end.discount;
+    move[cycle] = weights.move.discount;
   }
   return { start, end, move };
 }

@@ -16,7 +16,11 @@ function below(points: readonly number[], key: number): number {
 }
 
 /** Where a key falls: the point before it, and how far on to the next (0 to 1). */
-function position(points: readonly number[], key: number, linear: boolean): [number, number] {
+export function position(
+  points: readonly number[],
+  key: number,
+  linear: boolean,
+): [number, number] {
   if (Number.isNaN(key)) return [0, Number.NaN];
   const index = below(points, key);
   const next = points[index + 1];
