@@ -46,6 +46,11 @@ const RESERVED: ReadonlyMap<string, 'word' | 'clock' | 'function'> = new Map([
   ...WORDS.map((name) => [name, 'word'] as const),
 ]);
 
+/** What the language keeps a symbol for, or undefined where it is free. */
+export function reservedAs(symbol: string): 'word' | 'clock' | 'function' | undefined {
+  return RESERVED.get(symbol);
+}
+
 /** Distinct names that are compared with all others, so that no document can ask for too many. */
 const MOST_SUGGESTIONS = 200;
 

@@ -49,8 +49,8 @@ function narrowed(group: Narrowable, free: readonly number[]): Group {
   }
 }
 
-/** The distribution of the one member left, or null where it has its own already. */
-function marginal(group: Group, index: number): Distribution | null {
+/** The distribution of one member by itself, or null where it has its own already. */
+export function marginal(group: Group, index: number): Distribution | null {
   switch (group.type) {
     case 'rankCorrelation':
       return null;

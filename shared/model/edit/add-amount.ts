@@ -25,5 +25,5 @@ export function addAmount(
   }
   const taken = payoff.amounts.map(({ id }) => id);
   const id = freshId(taken, state);
-  return { id, edits: [insertion(at, { id, state, formula } as { id: string })] };
+  return { id, edits: [insertion(at, { id, state, formula })] };
 }

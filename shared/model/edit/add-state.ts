@@ -37,7 +37,7 @@ function movementEdits({ movements }: ModelDocument, { id, label, type }: State)
     if (type === 'absorbing') return [];
     const taken = movements.rows.map((row) => row.id);
     const row = { id: freshId(taken, `from ${label}`), from: id, remainder: id, cells: [] };
-    return [insertion(['movements', 'rows'], { ...row, basis: 'probabilities' } as { id: string })];
+    return [insertion(['movements', 'rows'], { ...row, basis: 'probabilities' })];
   }
   const { curves } = movements;
   const taken = curves.map((curve) => curve.id);

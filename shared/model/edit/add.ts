@@ -18,12 +18,20 @@ export function newId(document: ModelDocument, what: What, label: string): strin
 }
 
 /** Puts a part of a document into the list at `at`, before the one named, or last. */
-export function insertion(at: Place, item: { id: string }, before: string | null = null): Edit {
+export function insertion<T extends { readonly id: string }>(
+  at: Place,
+  item: T,
+  before: string | null = null,
+): Edit {
   // Parts of a document are JSON; the compiler cannot see it in their loose types.
-  return { type: 'insert', at, item: item as Item, before };
+  return { type: 'insert', at, item: item as unknown as Item, before };
 }
 
 /** Puts a thing of this kind into its list. */
-export function adding(what: What, item: { id: string }, before: string | null = null): Edit {
+export function adding<T extends { readonly id: string }>(
+  what: What,
+  item: T,
+  before: string | null = null,
+): Edit {
   return insertion(listOf(what), item, before);
 }

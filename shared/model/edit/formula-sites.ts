@@ -119,7 +119,7 @@ export function mapTexts(
 
 /**
  * One formula made of several. Where any differs by strategy so does the result, for
- * each of `strategies`; a text that is missing counts as none and is left out.
+ * each of `strategies` that all of them have a text for.
  */
 export function combined(
   formulas: readonly StrategyFormula[],
@@ -128,9 +128,9 @@ export function combined(
 ): StrategyFormula {
   const texts = formulas.filter((formula) => typeof formula === 'string');
   if (texts.length === formulas.length) return combine(texts);
-  const byStrategy = strategies.map((id) => {
+  const byStrategy = strategies.flatMap((id) => {
     const own = formulas.flatMap((formula) => formulaFor(formula, id) ?? []);
-    return [id, combine(own)] as const;
+    return own.length < formulas.length ? [] : [[id, combine(own)] as const];
   });
   return { byStrategy: Object.fromEntries(byStrategy) };
 }

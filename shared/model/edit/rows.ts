@@ -115,7 +115,7 @@ export function addCell(
     row.cells.map((cell) => cell.id),
     to,
   );
-  return { id, edits: [insertion(at, { id, to, formula } as { id: string })] };
+  return { id, edits: [insertion(at, { id, to, formula })] };
 }
 
 /** The destination of a row that needs no formula; staying, where rates compete. */
