@@ -1,7 +1,8 @@
 /** The efficiency frontier as a chart, as a table, and as a file to take away. */
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
-import { saveFile, toCsv } from '../../components/csv.ts';
+import { toCsv } from '../../../shared/export/csv.ts';
+import { saveFile } from '../../components/save-file.ts';
 import { Swatch } from '../../components/strategy-mark.tsx';
 import { formatNumber, formatOutcome } from '../../i18n/format.ts';
 import type { Language } from '../../store/settings.ts';
