@@ -9,8 +9,7 @@ import type { Edit } from '../../model/edit/edit.ts';
 import { formulaEdits, mapTexts } from '../../model/edit/formula-sites.ts';
 import { listOf } from '../../model/edit/target.ts';
 import { DocumentError } from '../../model/issue.ts';
-import { symbolOf } from './symbol-of.ts';
-import { type Named, ownerOf, symbolIssue } from './symbols.ts';
+import { type Named, ownerOf, symbolIssue, symbolOf } from './symbols.ts';
 import { substitute } from './words-in.ts';
 
 /**

@@ -45,3 +45,21 @@ export function freshSymbol(document: ModelDocument, label: string): string {
   const taken = new Set(buildScope(document).scope.names.keys());
   return firstFree(reservedAs(stem) ? new Set([...taken, stem]) : taken, stem, '_');
 }
+
+/** The symbol of a thing, or undefined where there is no such thing. */
+export function symbolOf(document: ModelDocument, { what, id }: Named): string | undefined {
+  const lists = {
+    parameter: document.parameters,
+    variable: document.variables,
+    table: document.tables,
+    covariate: document.covariates,
+  };
+  return lists[what].find((item) => item.id === id)?.symbol;
+}
+
+const NAMED: readonly Target['what'][] = ['parameter', 'variable', 'table', 'covariate'];
+
+/** Whether formulas know a thing by a symbol. */
+export function isNamed(target: Target): target is Named {
+  return NAMED.includes(target.what);
+}

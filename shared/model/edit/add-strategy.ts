@@ -1,5 +1,5 @@
 /**
- *   addStrategy(document, { label, like? }): Added
+ *   addStrategy(document, { label, description?, like?, before? }): Added
  *
  * A new strategy begins as the twin of another (`like`; the comparator where absent):
  * the same movements, formulas and payoffs, so that the model runs at once.
@@ -14,13 +14,18 @@ export interface NewStrategy {
   readonly description?: string;
   /** Id of the strategy to begin from. */
   readonly like?: string;
+  /** Id of the strategy that it goes before; last where null or absent. */
+  readonly before?: string | null;
 }
 
-export function addStrategy(document: ModelDocument, { like, ...fields }: NewStrategy): Added {
+export function addStrategy(
+  document: ModelDocument,
+  { like, before, ...fields }: NewStrategy,
+): Added {
   const id = newId(document, 'strategy', fields.label);
   const twin = like ?? document.question.comparator;
   const edits = [
-    adding('strategy', { id, ...fields }),
+    adding('strategy', { ...fields, id }, before),
     ...limitedTo(document).flatMap(([at, list]) => joined(at, list, twin, id)),
     ...formulaEdits(document, (formula) => withTwin(formula, twin, id)),
   ];

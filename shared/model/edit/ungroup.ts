@@ -1,6 +1,7 @@
 /**
  *   leaveGroups(document, parameterId): Edit[]
  *   dissolveGroup(document, groupId): Edit[]
+ *   marginalIn(group, index): Distribution | null
  *
  * Parameters that part from the others of a group each keep the uncertainty they had:
  * their marginal distribution.
@@ -26,7 +27,7 @@ export function dissolveGroup(document: ModelDocument, id: string): Edit[] {
 
 function dissolution(group: Group, except: ReadonlySet<string> = new Set()): Edit[] {
   const alone = group.members.flatMap((id, index): Edit[] => {
-    const distribution = except.has(id) ? null : aloneIn(group, index);
+    const distribution = except.has(id) ? null : marginalIn(group, index);
     if (!distribution) return [];
     const at = ['parameters', { id }, 'distribution'];
     return [{ type: 'set', at, value: distribution as unknown as Json }];
@@ -35,10 +36,11 @@ function dissolution(group: Group, except: ReadonlySet<string> = new Set()): Edi
 }
 
 /**
+ * The distribution of a member by itself; null where it has its own already.
  * One probability of a Dirichlet row is beta, with the row's other counts for its second
  * (Johnson, Kotz and Balakrishnan, Continuous Multivariate Distributions; from memory).
  */
-function aloneIn(group: Group, index: number): Distribution | null {
+export function marginalIn(group: Group, index: number): Distribution | null {
   if (group.type !== 'dirichlet') return marginal(group, index);
   const alpha = group.counts[index] ?? 1;
   const total = group.counts.reduce((sum, count) => sum + count, 0);
