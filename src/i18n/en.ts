@@ -112,6 +112,7 @@ export const en = {
   },
   issueList: {
     where: 'Where: {{place}}',
+    suggestion: 'Did you mean {{suggestion}}?',
     more_one: 'and {{count}} more',
     more_other: 'and {{count}} more',
   },

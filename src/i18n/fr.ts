@@ -113,6 +113,7 @@ export const fr: Words = {
   },
   issueList: {
     where: 'Où\u00A0: {{place}}',
+    suggestion: 'Vouliez-vous dire {{suggestion}}\u00A0?',
     more_one: 'et {{count}} autre',
     more_other: 'et {{count}} autres',
   },
