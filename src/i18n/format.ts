@@ -55,7 +55,10 @@ export function formatLargeMoney(value: number, symbol: string, language: Langua
     minimumSignificantDigits: 2,
     maximumSignificantDigits: 2,
   });
-  return withSymbol(withMinus(format.format(value)), symbol, language);
+  const words = withMinus(format.format(value));
+  // French counts in nouns: "4,7 millions de KM".
+  if (language === 'fr') return `${words} de${NO_BREAK}${symbol}`;
+  return withSymbol(words, symbol, language);
 }
 
 /** Health outcomes: three decimals, fewer where the number is large enough to read without. */

@@ -5,6 +5,7 @@
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Figure } from '../../components/figure.tsx';
+import { Steady } from '../../components/steady.tsx';
 import {
   formatLargeMoney,
   formatMoney,
@@ -52,7 +53,9 @@ function BestCell({ now, was, names, threshold }: AnswerStripProps) {
   const changed = was && was.best !== now.best ? names.get(was.best) : null;
   return (
     <Cell label={t('strip.bestAt', { threshold })} was={changed}>
-      <span data-figure="best">{names.get(now.best)}</span>
+      <Steady others={[...names.values()]} className="">
+        <span data-figure="best">{names.get(now.best)}</span>
+      </Steady>
       {now.tied.length > 0 && (
         <Small>
           {t('strip.tied', { strategies: now.tied.map((id) => names.get(id)).join(', ') })}
@@ -112,6 +115,7 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
     return (
       <Cell label={t('strip.evpi')}>
         <span className="text-mute">{t('strip.noNumber')}</span>
+        {beneficiaries && <Small>{ROOM}</Small>}
       </Cell>
     );
   }
@@ -137,6 +141,9 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
     </Cell>
   );
 }
+
+/** Holds the place of a line that may come, so that the page does not jump when it does. */
+const ROOM = '\u00A0';
 
 /** The error of a run of so many draws: small, and where there is room. */
 function MonteCarlo(props: { estimate: Estimate; decimals: number; language: Language }) {
@@ -168,8 +175,10 @@ function Cell(props: { label: string; was?: string | null | undefined; children:
   return (
     <div className="min-w-0 border-rule py-2.5 pr-3 even:border-l even:pl-3 md:pr-4 md:not-first:border-l md:not-first:pl-4 max-md:nth-3:border-t max-md:nth-4:border-t">
       <p className="text-sm text-mute">{props.label}</p>
-      <p className="text-lg leading-snug font-bold sm:text-xl">{props.children}</p>
-      {props.was && <p className="text-sm text-brass">{t('strip.was', { before: props.was })}</p>}
+      <div className="text-lg leading-snug font-bold sm:text-xl">{props.children}</div>
+      <p className="text-sm text-brass">
+        {props.was ? t('strip.was', { before: props.was }) : ROOM}
+      </p>
     </div>
   );
 }

@@ -43,6 +43,7 @@ describe('money', () => {
 
   it('is said in words where it is large', () => {
     expect(formatLargeMoney(3_123_456, 'KM', 'en')).toBe(`KM${GAP}3.1 million`);
+    expect(formatLargeMoney(3_123_456, 'KM', 'fr')).toBe(`3,1 millions de${GAP}KM`);
     expect(formatLargeMoney(529_731, 'KM', 'en')).toBe(`KM${GAP}530,000`);
     expect(formatLargeMoney(0, 'KM', 'en')).toBe(`KM${GAP}0`);
   });
