@@ -87,7 +87,7 @@ export const en = {
     bestAt: 'Best at {{threshold}}',
     tied: 'as good: {{strategies}}',
     netBenefit: 'Net benefit a person, against {{comparator}}',
-    isComparator: 'it is the comparator itself',
+    isComparator: 'the comparator',
     probability: 'Probability best',
     evpi: 'Worth of knowing everything (EVPI), a person',
     population: '{{amount}} for all concerned',

@@ -93,7 +93,7 @@ export const fr: Words = {
     bestAt: 'La meilleure à {{threshold}}',
     tied: 'à égalité\u00A0: {{strategies}}',
     netBenefit: 'Bénéfice net par personne, contre {{comparator}}',
-    isComparator: 'c’est le comparateur lui-même',
+    isComparator: 'le comparateur',
     probability: 'Probabilité d’être la meilleure',
     evpi: 'Valeur de tout savoir (EVPI), par personne',
     population: '{{amount}} pour toutes les personnes concernées',

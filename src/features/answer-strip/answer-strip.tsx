@@ -73,11 +73,14 @@ function NetBenefitCell({ now, was, names, comparator, symbol, language }: Answe
   const before = was && words(was) !== text ? words(was) : null;
   const isComparator = now.best === comparator;
   return (
-    <Cell label={t('strip.netBenefit', { comparator: names.get(comparator) })} was={before}>
+    <Cell
+      label={t('strip.netBenefit', { comparator: names.get(comparator) })}
+      was={before}
+      note={isComparator ? t('strip.isComparator') : null}
+    >
       <Figure name="netBenefit" value={now.netBenefit}>
         {text}
       </Figure>
-      {isComparator && <Small>{t('strip.isComparator')}</Small>}
     </Cell>
   );
 }
@@ -120,6 +123,8 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
     );
   }
   const { evpi, populationEvpi } = now.chances;
+  const population = (value: number) =>
+    t('strip.population', { amount: formatLargeMoney(value, symbol, language) });
   const before =
     was?.chances && words(was.chances) !== words(now.chances) ? words(was.chances) : null;
   return (
@@ -130,11 +135,11 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
       <MonteCarlo estimate={evpi} decimals={decimalsFor(evpi)} language={language} />
       {populationEvpi && (
         <Small>
-          <data value={populationEvpi.value} data-figure="populationEvpi">
-            {t('strip.population', {
-              amount: formatLargeMoney(populationEvpi.value, symbol, language),
-            })}
-          </data>
+          <Steady others={[population(LONGEST)]} className="">
+            <data value={populationEvpi.value} data-figure="populationEvpi">
+              {population(populationEvpi.value)}
+            </data>
+          </Steady>
           <span className="sr-only"> ({beneficiaries})</span>
         </Small>
       )}
@@ -142,6 +147,8 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
   );
 }
 
+/** A sum that takes as much room as any. */
+const LONGEST = 888_000_000;
 /** Holds the place of a line that may come, so that the page does not jump when it does. */
 const ROOM = '\u00A0';
 
@@ -170,15 +177,25 @@ function decimalsFor({ standardError }: Estimate): number {
   return Math.min(2, Math.max(0, -Math.floor(Math.log10(standardError))));
 }
 
-function Cell(props: { label: string; was?: string | null | undefined; children: ReactNode }) {
+interface CellProps {
+  readonly label: string;
+  readonly was?: string | null | undefined;
+  /** Said where there is no "was" to say. */
+  readonly note?: string | null;
+  readonly children: ReactNode;
+}
+
+function Cell(props: CellProps) {
   const { t } = useTranslation();
   return (
     <div className="min-w-0 border-rule py-2.5 pr-3 even:border-l even:pl-3 md:pr-4 md:not-first:border-l md:not-first:pl-4 max-md:nth-3:border-t max-md:nth-4:border-t">
       <p className="text-sm text-mute">{props.label}</p>
       <div className="text-lg leading-snug font-bold sm:text-xl">{props.children}</div>
-      <p className="text-sm text-brass">
-        {props.was ? t('strip.was', { before: props.was }) : ROOM}
-      </p>
+      {props.was ? (
+        <p className="text-sm text-brass">{t('strip.was', { before: props.was })}</p>
+      ) : (
+        <p className="text-sm text-mute">{props.note ?? ROOM}</p>
+      )}
     </div>
   );
 }

@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { toHealth } from '../../../../shared/analysis/direction.ts';
 import { frontierSegments } from '../../../../shared/analysis/frontier-segments.ts';
@@ -46,13 +47,12 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
   const { direction } = document.question.outcome;
   const finding = (strategy: string) =>
     findingWords(comparison.rows, strategy, { t, names, thresholdWords, symbol, language });
-  const segments = frontierSegments(comparison.rows, Number.POSITIVE_INFINITY);
-  const frontier = new Set(frontierRows(comparison.rows).map(({ id }) => id));
-  const order = document.strategies.map(({ id }) => id);
-  // Turning twice gives the outcome back in its own direction.
-  const outcomes = new Map(
-    comparison.rows.map(({ id, health }) => [id, toHealth(health, direction)]),
+  const segments = useMemo(
+    () => frontierSegments(comparison.rows, Number.POSITIVE_INFINITY),
+    [comparison],
   );
+  const points = useMemo(() => frontierPoints({ document, comparison }), [document, comparison]);
+  const outcomes = new Map(points.map(({ id, outcome: value }) => [id, value]));
   return (
     <>
       <div className="mt-7 max-w-[60rem]">
@@ -85,14 +85,7 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
           </p>
         </section>
         <Frontier
-          points={comparison.rows.map(({ id, cost }) => ({
-            id,
-            name: names.get(id) ?? id,
-            index: order.indexOf(id),
-            cost,
-            outcome: outcomes.get(id) ?? 0,
-            onFrontier: frontier.has(id),
-          }))}
+          points={points}
           fewerIsBetter={direction === 'fewerIsBetter'}
           symbol={symbol}
           unit={outcome.plural}
@@ -103,6 +96,18 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
       <Notes result={result} issues={issues} />
     </>
   );
+}
+
+function frontierPoints({ document, comparison }: Pick<Result, 'document' | 'comparison'>) {
+  const { direction } = document.question.outcome;
+  const onFrontier = new Set(frontierRows(comparison.rows).map(({ id }) => id));
+  return comparison.rows.map(({ id, cost, health }) => {
+    const index = document.strategies.findIndex((strategy) => strategy.id === id);
+    // Turning twice gives the outcome back in its own direction.
+    const outcome = toHealth(health, direction);
+    const name = document.strategies[index]?.label ?? id;
+    return { id, name, index, cost, outcome, onFrontier: onFrontier.has(id) };
+  });
 }
 
 /** What the reader should know of the runs: warnings, and where the means say otherwise. */
