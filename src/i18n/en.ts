@@ -54,7 +54,7 @@ export const en = {
     unreadable:
       '{{file}} could not be read from this device. Check that it is still there, and choose it again.',
   },
-  rail: { label: 'Steps of the appraisal', open: 'Steps', close: 'Close' },
+  rail: { label: 'Steps of the appraisal', open: 'Steps', close: 'Close', all: 'All appraisals' },
   steps: { question: 'Question', evidence: 'Evidence', results: 'Results' },
   state: {
     example: 'Worked example, on this device',
@@ -87,7 +87,7 @@ export const en = {
     bestAt: 'Best at {{threshold}}',
     tied: 'as good: {{strategies}}',
     netBenefit: 'Net benefit a person, against {{comparator}}',
-    isComparator: 'it is the comparator itself',
+    isComparator: 'the comparator',
     probability: 'Probability best',
     evpi: 'Worth of knowing everything (EVPI), a person',
     population: '{{amount}} for all concerned',
@@ -112,6 +112,7 @@ export const en = {
   },
   issueList: {
     where: 'Where: {{place}}',
+    suggestion: 'Did you mean {{suggestion}}?',
     more_one: 'and {{count}} more',
     more_other: 'and {{count}} more',
   },
@@ -140,6 +141,10 @@ export const en = {
     from: 'above {{from}}',
     between: '{{from}} to {{to}}',
     notches: 'Put the poise at',
+    basis: 'Weigh by',
+    base: 'Base case',
+    mean_one: 'Mean of {{count}} draw',
+    mean_other: 'Mean of {{count, number}} draws',
     savingsLift: 'Savings lift the hook.',
     lossLifts: 'Health given up lifts the poise.',
     words: {
@@ -167,7 +172,7 @@ export const en = {
     nmb: 'Net benefit',
     nmbIn: 'Net benefit, {{symbol}}',
     per: '{{symbol}} per {{unit}}',
-    note: 'A person, discounted, base case. Net benefit at {{threshold}}.',
+    note: 'A person, discounted. Net benefit at {{threshold}}. {{basis}}.',
     noIcer: {
       reference: 'reference',
       dominated: 'dominated',

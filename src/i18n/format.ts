@@ -6,6 +6,19 @@ import type { Language } from '../store/settings.ts';
 
 const NO_BREAK = '\u00A0';
 
+const formatters = new Map<string, Intl.NumberFormat>();
+
+/** Formatters are dear to make, and every movement of the poise writes a hundred numbers. */
+function formatter(language: Language, options: Intl.NumberFormatOptions): Intl.NumberFormat {
+  const key = `${language} ${JSON.stringify(options)}`;
+  let format = formatters.get(key);
+  if (format === undefined) {
+    format = new Intl.NumberFormat(language, options);
+    formatters.set(key, format);
+  }
+  return format;
+}
+
 interface NumberOptions {
   /** Decimals, always all of them. */
   readonly decimals?: number;
@@ -18,7 +31,7 @@ export function formatNumber(
   language: Language,
   { decimals = 0, signed = false }: NumberOptions = {},
 ): string {
-  const format = new Intl.NumberFormat(language, {
+  const format = formatter(language, {
     minimumFractionDigits: decimals,
     maximumFractionDigits: decimals,
     signDisplay: signed ? 'exceptZero' : 'negative',
@@ -49,13 +62,16 @@ export function formatLargeMoney(value: number, symbol: string, language: Langua
     const grain = 10 ** Math.max(0, Math.floor(Math.log10(size || 1)) - 2);
     return formatMoney(Math.round(value / grain) * grain, symbol, language);
   }
-  const format = new Intl.NumberFormat(language, {
+  const format = formatter(language, {
     notation: 'compact',
     compactDisplay: 'long',
     minimumSignificantDigits: 2,
     maximumSignificantDigits: 2,
   });
-  return withSymbol(withMinus(format.format(value)), symbol, language);
+  const words = withMinus(format.format(value));
+  // French counts in nouns: "4,7 millions de KM".
+  if (language === 'fr') return `${words} de${NO_BREAK}${symbol}`;
+  return withSymbol(words, symbol, language);
 }
 
 /** Health outcomes: three decimals, fewer where the number is large enough to read without. */
@@ -74,11 +90,11 @@ export function formatProbability(value: number, language: Language): string {
 
 /** A value of a parameter, to as many figures as it needs. */
 export function formatValue(value: number, language: Language): string {
-  return withMinus(new Intl.NumberFormat(language, { maximumSignificantDigits: 6 }).format(value));
+  return withMinus(formatter(language, { maximumSignificantDigits: 6 }).format(value));
 }
 
 export function formatPercent(share: number, language: Language): string {
-  const format = new Intl.NumberFormat(language, { style: 'percent', maximumFractionDigits: 1 });
+  const format = formatter(language, { style: 'percent', maximumFractionDigits: 1 });
   return withMinus(format.format(share));
 }
 

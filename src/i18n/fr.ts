@@ -55,7 +55,12 @@ export const fr: Words = {
     unreadable:
       '{{file}} n’a pas pu être lu sur cet appareil. Vérifiez qu’il y est toujours, et choisissez-le à nouveau.',
   },
-  rail: { label: 'Étapes de l’évaluation', open: 'Étapes', close: 'Fermer' },
+  rail: {
+    label: 'Étapes de l’évaluation',
+    open: 'Étapes',
+    close: 'Fermer',
+    all: 'Toutes les évaluations',
+  },
   steps: { question: 'Question', evidence: 'Données', results: 'Résultats' },
   state: {
     example: 'Exemple travaillé, sur cet appareil',
@@ -88,7 +93,7 @@ export const fr: Words = {
     bestAt: 'La meilleure à {{threshold}}',
     tied: 'à égalité\u00A0: {{strategies}}',
     netBenefit: 'Bénéfice net par personne, contre {{comparator}}',
-    isComparator: 'c’est le comparateur lui-même',
+    isComparator: 'le comparateur',
     probability: 'Probabilité d’être la meilleure',
     evpi: 'Valeur de tout savoir (EVPI), par personne',
     population: '{{amount}} pour toutes les personnes concernées',
@@ -113,6 +118,7 @@ export const fr: Words = {
   },
   issueList: {
     where: 'Où\u00A0: {{place}}',
+    suggestion: 'Vouliez-vous dire {{suggestion}}\u00A0?',
     more_one: 'et {{count}} autre',
     more_other: 'et {{count}} autres',
   },
@@ -142,6 +148,10 @@ export const fr: Words = {
     from: 'au-dessus de {{from}}',
     between: 'de {{from}} à {{to}}',
     notches: 'Placer le poids à',
+    basis: 'Peser d’après',
+    base: 'Cas de base',
+    mean_one: 'Moyenne de {{count}} tirage',
+    mean_other: 'Moyenne de {{count, number}} tirages',
     savingsLift: 'Les économies soulèvent le crochet.',
     lossLifts: 'La santé perdue soulève le poids.',
     words: {
@@ -170,7 +180,7 @@ export const fr: Words = {
     nmb: 'Bénéfice net',
     nmbIn: 'Bénéfice net, {{symbol}}',
     per: '{{symbol}} par {{unit}}',
-    note: 'Par personne, actualisé, cas de base. Bénéfice net à {{threshold}}. RDCR\u00A0: rapport différentiel coût-résultat.',
+    note: 'Par personne, actualisé. Bénéfice net à {{threshold}}. {{basis}}. RDCR\u00A0: rapport différentiel coût-résultat.',
     noIcer: {
       reference: 'référence',
       dominated: 'dominée',

@@ -9,6 +9,18 @@ export const issues = {
   },
   distribution: {
     noGroup: '{{parameter}} is drawn with the group {{group}}, which does not exist.',
+    empty: '{{parameter}} is drawn from an empty list.',
+    infinite: 'Some draws of {{parameter}} would be infinite.',
+    limits: 'The limits of {{parameter}} do not rise: from {{low}} to {{high}}.',
+    notFinite: '{{name}} of {{parameter}} is not a finite number.',
+    notPositive: '{{name}} of {{parameter}} is {{value}}; it must be above 0.',
+    outsideKind: 'Draws of {{parameter}} can leave what a quantity of the kind “{{kind}}” can be.',
+    unusualForKind:
+      '{{parameter}}: {{distribution}} is an unusual distribution for the kind “{{kind}}”.',
+    valueFar:
+      'The base value {{value}} of {{parameter}} lies outside the 95% interval of its draws ({{low}} to {{high}}).',
+    valueOutside:
+      'The base value {{value}} of {{parameter}} can never be drawn ({{low}} to {{high}}).',
   },
   document: {
     badVersion: 'The version of the format must be a whole number from 1 on.',
@@ -50,7 +62,7 @@ export const issues = {
   formula: {
     badNumber: '{{text}} is not a number.',
     chainedComparison: 'Two comparisons in a row: join them with “and”.',
-    constantOutsideRange: '{{value}} cannot be a value of the kind {{kind}}.',
+    constantOutsideRange: '{{value}} cannot be a value of the kind “{{kind}}”.',
     cycle: 'Names that define one another in a circle: {{cycle}}.',
     cycleCostPerYear: 'A cost a cycle stands where a cost a year is meant.',
     decimalComma: '{{text}}: write decimals with a point.',
@@ -59,16 +71,16 @@ export const issues = {
     empty: 'The formula is empty.',
     functionWithoutBrackets: '{{name}} is a function: it needs brackets after it.',
     incomplete: 'The formula breaks off after {{after}}.',
-    kindMismatch: 'A quantity of the kind {{got}} stands where {{wanted}} is meant.',
+    kindMismatch: 'A quantity of the kind “{{got}}” stands where “{{wanted}}” is meant.',
     lookupNeedsTable: 'The first thing that lookup takes is the name of a table.',
     misplacedNot: '“not” cannot stand here.',
     missingForStrategy: 'There is no formula for the strategy {{strategy}}.',
-    mixedFlows: 'Money of two kinds is added: {{left}} and {{right}}.',
-    mixedKinds: 'Quantities that cannot be added or compared: {{left}} and {{right}}.',
+    mixedFlows: 'Money of two kinds is added: “{{left}}” and “{{right}}”.',
+    mixedKinds: 'Quantities that cannot be added or compared: “{{left}}” and “{{right}}”.',
     noStartAge: '“age” needs a covariate start_age in every profile.',
     noTimeInState: '“time_in_state” has a meaning only in rows and payoffs of a timed state.',
     notAFunction: '{{name}} is no function.',
-    notAnOutcome: 'A quantity of the kind {{got}} cannot be counted as an outcome.',
+    notAnOutcome: 'A quantity of the kind “{{got}}” cannot be counted as an outcome.',
     numberTooLarge: '{{text}} is too large a number.',
     operatorExpected: 'An operator such as + or * is missing here.',
     probabilityAsRate: 'A probability stands where a rate is meant: turn it with hazard().',
@@ -77,6 +89,9 @@ export const issues = {
     syntax: 'The formula cannot be read.',
     tableWithoutLookup: '{{name}} is a table: read it with lookup().',
     tooDeep: 'The formula is nested more than {{limit}} deep.',
+    tooDeepTogether: 'Definitions rest on one another more than {{maximum}} deep.',
+    tooMuchText: 'All formulas together are longer than {{limit}} characters.',
+    tooMuchWork: 'The variables rest on one another in too many ways to be checked.',
     tooLarge: 'The formula has more than {{limit}} parts.',
     tooLong: 'The formula is longer than {{limit}} characters.',
     unclosedBracket: 'A bracket is opened and never closed.',
@@ -191,8 +206,8 @@ export const issues = {
   },
   values: {
     drawsOutsideKind:
-      'Draws of this {{distribution}} distribution can leave what the kind {{kind}} allows.',
-    outsideKind: '{{value}} is not a value that the kind {{kind}} can take.',
+      'Draws of this {{distribution}} distribution can leave what the kind “{{kind}}” allows.',
+    outsideKind: '{{value}} is not a value that the kind “{{kind}}” can take.',
   },
   variables: {
     unknown: 'There is no variable {{id}}.',

@@ -11,6 +11,19 @@ export const issues = {
   },
   distribution: {
     noGroup: '{{parameter}} est tiré avec le groupe {{group}}, qui n’existe pas.',
+    empty: '{{parameter}} est tiré d’une liste vide.',
+    infinite: 'Certains tirages de {{parameter}} seraient infinis.',
+    limits: 'Les bornes de {{parameter}} ne croissent pas\u00A0: de {{low}} à {{high}}.',
+    notFinite: '{{name}} de {{parameter}} n’est pas un nombre fini.',
+    notPositive: '{{name}} de {{parameter}} vaut {{value}}\u00A0; il faut plus de 0.',
+    outsideKind:
+      'Des tirages de {{parameter}} peuvent sortir de ce que peut être une grandeur du genre «\u00A0{{kind}}\u00A0».',
+    unusualForKind:
+      '{{parameter}}\u00A0: {{distribution}} est une distribution inhabituelle pour le genre «\u00A0{{kind}}\u00A0».',
+    valueFar:
+      'La valeur de base {{value}} de {{parameter}} est hors de l’intervalle à 95 % de ses tirages ({{low}} à {{high}}).',
+    valueOutside:
+      'La valeur de base {{value}} de {{parameter}} ne peut jamais être tirée ({{low}} à {{high}}).',
   },
   document: {
     badVersion: 'La version du format doit être un nombre entier à partir de 1.',
@@ -54,7 +67,7 @@ export const issues = {
   formula: {
     badNumber: '{{text}} n’est pas un nombre.',
     chainedComparison: 'Deux comparaisons à la suite\u00A0: reliez-les par «\u00A0and\u00A0».',
-    constantOutsideRange: '{{value}} ne peut pas être une valeur du genre {{kind}}.',
+    constantOutsideRange: '{{value}} ne peut pas être une valeur du genre «\u00A0{{kind}}\u00A0».',
     cycle: 'Des noms se définissent en cercle\u00A0: {{cycle}}.',
     cycleCostPerYear: 'Un coût par cycle figure là où l’on attend un coût par an.',
     decimalComma: '{{text}}\u00A0: écrivez les décimales avec un point.',
@@ -63,17 +76,20 @@ export const issues = {
     empty: 'La formule est vide.',
     functionWithoutBrackets: '{{name}} est une fonction\u00A0: il lui faut des parenthèses.',
     incomplete: 'La formule s’interrompt après {{after}}.',
-    kindMismatch: 'Une grandeur du genre {{got}} figure là où l’on attend {{wanted}}.',
+    kindMismatch:
+      'Une grandeur du genre «\u00A0{{got}}\u00A0» figure là où l’on attend «\u00A0{{wanted}}\u00A0».',
     lookupNeedsTable: 'lookup prend d’abord le nom d’une table.',
     misplacedNot: '«\u00A0not\u00A0» ne peut pas se trouver ici.',
     missingForStrategy: 'Il n’y a pas de formule pour la stratégie {{strategy}}.',
-    mixedFlows: 'On additionne deux genres de montants\u00A0: {{left}} et {{right}}.',
+    mixedFlows:
+      'On additionne deux genres de montants\u00A0: «\u00A0{{left}}\u00A0» et «\u00A0{{right}}\u00A0».',
     mixedKinds:
-      'Des grandeurs qui ne s’additionnent ni ne se comparent\u00A0: {{left}} et {{right}}.',
+      'Des grandeurs qui ne s’additionnent ni ne se comparent\u00A0: «\u00A0{{left}}\u00A0» et «\u00A0{{right}}\u00A0».',
     noStartAge: '«\u00A0age\u00A0» demande une covariable start_age dans chaque profil.',
     noTimeInState: '«\u00A0time_in_state\u00A0» n’a de sens que pour un état qui connaît sa durée.',
     notAFunction: '{{name}} n’est pas une fonction.',
-    notAnOutcome: 'Une grandeur du genre {{got}} ne peut pas être comptée comme résultat de santé.',
+    notAnOutcome:
+      'Une grandeur du genre «\u00A0{{got}}\u00A0» ne peut pas être comptée comme résultat de santé.',
     numberTooLarge: '{{text}} est un nombre trop grand.',
     operatorExpected: 'Il manque ici un opérateur tel que + ou *.',
     probabilityAsRate:
@@ -84,6 +100,11 @@ export const issues = {
     syntax: 'La formule ne peut pas être lue.',
     tableWithoutLookup: '{{name}} est une table\u00A0: lisez-la avec lookup().',
     tooDeep: 'La formule est emboîtée sur plus de {{limit}} niveaux.',
+    tooDeepTogether:
+      'Les définitions s’appuient les unes sur les autres sur plus de {{maximum}} niveaux.',
+    tooMuchText: 'Toutes les formules ensemble dépassent {{limit}} caractères.',
+    tooMuchWork:
+      'Les variables s’appuient les unes sur les autres de trop de façons pour être vérifiées.',
     tooLarge: 'La formule a plus de {{limit}} éléments.',
     tooLong: 'La formule dépasse {{limit}} caractères.',
     unclosedBracket: 'Une parenthèse est ouverte et jamais fermée.',
@@ -199,8 +220,8 @@ export const issues = {
   },
   values: {
     drawsOutsideKind:
-      'Des tirages de cette distribution ({{distribution}}) peuvent sortir de ce que permet le genre {{kind}}.',
-    outsideKind: '{{value}} n’est pas une valeur que le genre {{kind}} peut prendre.',
+      'Des tirages de cette distribution ({{distribution}}) peuvent sortir de ce que permet le genre «\u00A0{{kind}}\u00A0».',
+    outsideKind: '{{value}} n’est pas une valeur que le genre «\u00A0{{kind}}\u00A0» peut prendre.',
   },
   variables: {
     unknown: 'Il n’y a pas de variable {{id}}.',

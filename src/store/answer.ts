@@ -1,6 +1,6 @@
 /**
  * The answer at one threshold: what the strip, the beam and the table show. Costs and
- * health are the base case's; the chances are those of the draws.
+ * health are the base case's or the means of the draws; the chances are the draws' own.
  */
 import { againstComparator } from '../../shared/analysis/against-comparator.ts';
 import { toHealth } from '../../shared/analysis/direction.ts';
@@ -10,6 +10,7 @@ import type { Option } from '../../shared/analysis/option.ts';
 import { affectedPopulation, forPopulation } from '../../shared/analysis/population.ts';
 import type { Draws } from '../../shared/analysis/psa/draws.ts';
 import { evpi } from '../../shared/analysis/psa/evpi.ts';
+import { summarise } from '../../shared/analysis/psa/means.ts';
 import { sweep } from '../../shared/analysis/psa/sweep.ts';
 import type { BaseRun } from '../../shared/engine/results.ts';
 import type { ModelDocument } from '../../shared/model/document.ts';
@@ -19,6 +20,13 @@ export interface Comparison {
   readonly options: readonly Option[];
   /** In order of cost. */
   readonly rows: readonly IncrementalRow[];
+  /** Monte Carlo standard errors by strategy; null in the base case, which has none. */
+  readonly errors: ReadonlyMap<string, Errors> | null;
+}
+
+export interface Errors {
+  readonly cost: number | null;
+  readonly health: number | null;
 }
 
 export interface Estimate {
@@ -59,7 +67,23 @@ export function compare(document: ModelDocument, base: BaseRun): Comparison {
     cost,
     health: toHealth(outcome, direction),
   }));
-  return { options, rows: incremental(options) };
+  return { options, rows: incremental(options), errors: null };
+}
+
+/** The same comparison on the means over the draws, as many reference cases ask for. */
+export function compareMeans(draws: Draws): Comparison {
+  const options = draws.strategies.map((id, s) => {
+    const cost = summarise(draws.cost[s] ?? new Float64Array());
+    const health = summarise(draws.health[s] ?? new Float64Array());
+    return {
+      id,
+      cost: cost.mean,
+      health: health.mean,
+      errors: { cost: cost.se, health: health.se },
+    };
+  });
+  const errors = new Map(options.map((option) => [option.id, option.errors]));
+  return { options, rows: incremental(options), errors };
 }
 
 /** @param threshold money per unit of health, 0 or more. */

@@ -1,9 +1,16 @@
-import { type Remote, releaseProxy, wrap } from 'comlink';
+import { releaseProxy, wrap } from 'comlink';
 import type { Simulator } from './simulator.ts';
+
+/** The simulator from the other side of the thread: every answer is a promise. */
+export type RemoteSimulator = {
+  readonly [K in keyof Simulator]: (
+    ...args: Parameters<Simulator[K]>
+  ) => Promise<ReturnType<Simulator[K]>>;
+};
 
 /** A worker as the pool sees it. */
 export interface SimulatorWorker {
-  readonly remote: Pick<Remote<Simulator>, keyof Simulator>;
+  readonly remote: RemoteSimulator;
   /** Rejects when the worker cannot start or breaks down; Comlink would wait for ever. */
   readonly failed: Promise<never>;
   stop(): void;

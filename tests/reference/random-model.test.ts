@@ -46,6 +46,8 @@ const WANTED: Record<string, (model: ModelDocument) => boolean> = {
     m.variables.some(({ formula }) => /_of_\d/.test(JSON.stringify(formula))),
   'tables by two keys': (m) => m.tables.some(({ keys }) => keys.length === 2),
   'linear tables': (m) => m.tables.some(({ interpolation }) => interpolation === 'linear'),
+  'a horizon of no whole number of cycles': ({ question: q }) =>
+    Math.abs(q.horizon / q.cycleLength - Math.round(q.horizon / q.cycleLength)) > 0.2,
   'whole years': (m) => m.question.discounting.wholeYears,
   'rates by year': (m) => typeof m.question.discounting.costs !== 'number',
   'predictors that would overflow': (m) => JSON.stringify(m.movements).includes('"800 + '),

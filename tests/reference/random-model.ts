@@ -69,7 +69,8 @@ function randomQuestion(random: Seeded) {
   return {
     cycles,
     question: question({
-      horizon: cycles * cycleLength,
+      // Rounds to the same number of cycles.
+      horizon: (cycles + random.pick([0, 0, 0, 0.3, -0.4])) * cycleLength,
       cycleLength,
       counting,
       discounting: {

@@ -5,6 +5,7 @@
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Figure } from '../../components/figure.tsx';
+import { Steady } from '../../components/steady.tsx';
 import {
   formatLargeMoney,
   formatMoney,
@@ -52,7 +53,9 @@ function BestCell({ now, was, names, threshold }: AnswerStripProps) {
   const changed = was && was.best !== now.best ? names.get(was.best) : null;
   return (
     <Cell label={t('strip.bestAt', { threshold })} was={changed}>
-      <span data-figure="best">{names.get(now.best)}</span>
+      <Steady others={[...names.values()]} className="">
+        <span data-figure="best">{names.get(now.best)}</span>
+      </Steady>
       {now.tied.length > 0 && (
         <Small>
           {t('strip.tied', { strategies: now.tied.map((id) => names.get(id)).join(', ') })}
@@ -70,11 +73,14 @@ function NetBenefitCell({ now, was, names, comparator, symbol, language }: Answe
   const before = was && words(was) !== text ? words(was) : null;
   const isComparator = now.best === comparator;
   return (
-    <Cell label={t('strip.netBenefit', { comparator: names.get(comparator) })} was={before}>
+    <Cell
+      label={t('strip.netBenefit', { comparator: names.get(comparator) })}
+      was={before}
+      note={isComparator ? t('strip.isComparator') : null}
+    >
       <Figure name="netBenefit" value={now.netBenefit}>
         {text}
       </Figure>
-      {isComparator && <Small>{t('strip.isComparator')}</Small>}
     </Cell>
   );
 }
@@ -112,10 +118,13 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
     return (
       <Cell label={t('strip.evpi')}>
         <span className="text-mute">{t('strip.noNumber')}</span>
+        {beneficiaries && <Small>{ROOM}</Small>}
       </Cell>
     );
   }
   const { evpi, populationEvpi } = now.chances;
+  const population = (value: number) =>
+    t('strip.population', { amount: formatLargeMoney(value, symbol, language) });
   const before =
     was?.chances && words(was.chances) !== words(now.chances) ? words(was.chances) : null;
   return (
@@ -126,17 +135,22 @@ function EvpiCell({ now, was, symbol, beneficiaries, language }: AnswerStripProp
       <MonteCarlo estimate={evpi} decimals={decimalsFor(evpi)} language={language} />
       {populationEvpi && (
         <Small>
-          <data value={populationEvpi.value} data-figure="populationEvpi">
-            {t('strip.population', {
-              amount: formatLargeMoney(populationEvpi.value, symbol, language),
-            })}
-          </data>
+          <Steady others={[population(LONGEST)]} className="">
+            <data value={populationEvpi.value} data-figure="populationEvpi">
+              {population(populationEvpi.value)}
+            </data>
+          </Steady>
           <span className="sr-only"> ({beneficiaries})</span>
         </Small>
       )}
     </Cell>
   );
 }
+
+/** A sum that takes as much room as any. */
+const LONGEST = 888_000_000;
+/** Holds the place of a line that may come, so that the page does not jump when it does. */
+const ROOM = '\u00A0';
 
 /** The error of a run of so many draws: small, and where there is room. */
 function MonteCarlo(props: { estimate: Estimate; decimals: number; language: Language }) {
@@ -163,13 +177,25 @@ function decimalsFor({ standardError }: Estimate): number {
   return Math.min(2, Math.max(0, -Math.floor(Math.log10(standardError))));
 }
 
-function Cell(props: { label: string; was?: string | null | undefined; children: ReactNode }) {
+interface CellProps {
+  readonly label: string;
+  readonly was?: string | null | undefined;
+  /** Said where there is no "was" to say. */
+  readonly note?: string | null;
+  readonly children: ReactNode;
+}
+
+function Cell(props: CellProps) {
   const { t } = useTranslation();
   return (
     <div className="min-w-0 border-rule py-2.5 pr-3 even:border-l even:pl-3 md:pr-4 md:not-first:border-l md:not-first:pl-4 max-md:nth-3:border-t max-md:nth-4:border-t">
       <p className="text-sm text-mute">{props.label}</p>
-      <p className="text-lg leading-snug font-bold sm:text-xl">{props.children}</p>
-      {props.was && <p className="text-sm text-brass">{t('strip.was', { before: props.was })}</p>}
+      <div className="text-lg leading-snug font-bold sm:text-xl">{props.children}</div>
+      {props.was ? (
+        <p className="text-sm text-brass">{t('strip.was', { before: props.was })}</p>
+      ) : (
+        <p className="text-sm text-mute">{props.note ?? ROOM}</p>
+      )}
     </div>
   );
 }

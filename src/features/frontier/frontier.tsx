@@ -1,5 +1,5 @@
 /** The efficiency frontier as a chart, as a table, and as a file to take away. */
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { toCsv } from '../../../shared/export/csv.ts';
 import { saveFile } from '../../components/save-file.ts';
@@ -18,7 +18,8 @@ interface FrontierProps {
   readonly language: Language;
 }
 
-export function Frontier(props: FrontierProps) {
+/** Does not depend on the poise: it is drawn anew only when its points change. */
+export const Frontier = memo(function Frontier(props: FrontierProps) {
   const { points, symbol, unit, fewerIsBetter } = props;
   const { t } = useTranslation();
   const [shown, setShown] = useState<'chart' | 'table'>('chart');
@@ -81,7 +82,7 @@ export function Frontier(props: FrontierProps) {
       </div>
     </section>
   );
-}
+});
 
 function FrontierTable({ points, symbol, unit, language }: FrontierProps) {
   const { t } = useTranslation();

@@ -36,6 +36,8 @@ const SIDES = [
   { dx: 0, dy: -16, anchor: 'middle' },
   { dx: 14, dy: -10, anchor: 'start' },
   { dx: -14, dy: 20, anchor: 'end' },
+  { dx: 0, dy: -26, anchor: 'middle' },
+  { dx: 0, dy: 36, anchor: 'middle' },
 ] as const;
 
 /**

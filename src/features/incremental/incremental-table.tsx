@@ -6,6 +6,7 @@ import { Figure } from '../../components/figure.tsx';
 import { Swatch } from '../../components/strategy-mark.tsx';
 import { formatAmount, formatNumber, formatOutcome } from '../../i18n/format.ts';
 import type { OutcomeWords } from '../../i18n/outcome-words.ts';
+import type { Errors } from '../../store/answer.ts';
 import type { Language } from '../../store/settings.ts';
 
 export interface IncrementalTableProps {
@@ -13,6 +14,8 @@ export interface IncrementalTableProps {
   readonly rows: readonly IncrementalRow[];
   /** Primary outcome by strategy, in its own direction. */
   readonly outcomes: ReadonlyMap<string, number>;
+  /** Monte Carlo standard errors by strategy, where the numbers are means of draws. */
+  readonly errors: ReadonlyMap<string, Errors> | null;
   /** Net monetary benefit by strategy at the threshold in force. */
   readonly nmb: ReadonlyMap<string, number>;
   /** Strategies' names by id, in document order. */
@@ -141,21 +144,40 @@ function Name({ id, names }: { id: string; names: ReadonlyMap<string, string> })
 
 type CellProps = IncrementalTableProps & { readonly row: IncrementalRow };
 
-function Cost({ row, rows, language }: CellProps) {
+function Cost({ row, rows, errors, language }: CellProps) {
   const decimals = columnDecimals(rows.map(({ cost }) => cost));
   return (
     <Figure name="cost" value={row.cost}>
       {formatNumber(row.cost, language, { decimals })}
+      <PlusMinus error={errors?.get(row.id)?.cost} decimals={decimals} language={language} />
     </Figure>
   );
 }
 
-function Outcome({ row, outcomes, language }: CellProps) {
+function Outcome({ row, outcomes, errors, language }: CellProps) {
   const value = outcomes.get(row.id) ?? 0;
   return (
     <Figure name="outcome" value={value}>
       {formatOutcome(value, language)}
+      <PlusMinus error={errors?.get(row.id)?.health} decimals={3} language={language} />
     </Figure>
+  );
+}
+
+interface PlusMinusProps {
+  readonly error: number | null | undefined;
+  readonly decimals: number;
+  readonly language: Language;
+}
+
+function PlusMinus({ error, decimals, language }: PlusMinusProps) {
+  if (!error) return null;
+  // Rounded up: an error of 0 would say too much.
+  const shown = Math.max(error, 10 ** -decimals);
+  return (
+    <span className="ml-1 text-sm font-normal text-mute">
+      ± {formatNumber(shown, language, { decimals })}
+    </span>
   );
 }
 

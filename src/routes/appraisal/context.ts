@@ -18,10 +18,15 @@ export interface AppraisalContext {
   readonly language: Language;
 }
 
+export type Basis = 'base' | 'mean';
+
 /** There only while the model is whole. */
 export interface Result {
   readonly document: ModelDocument;
   readonly comparison: Comparison;
+  /** What costs and health are taken from. */
+  readonly basis: Basis;
+  readonly setBasis: (basis: Basis) => void;
   readonly now: Answer;
   readonly run: DrawsRun;
   readonly move: (move: Move) => void;

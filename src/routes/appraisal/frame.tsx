@@ -1,5 +1,6 @@
 import { type ReactNode, useRef } from 'react';
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
 import type { ModelDocument } from '../../../shared/model/document.ts';
 import { Brand } from '../../components/brand.tsx';
 import { Preferences } from '../../components/preferences.tsx';
@@ -36,6 +37,7 @@ export function Frame({ document, file, strip, children }: FrameProps) {
         <Brand />
         <div className="mt-5">
           <Rail steps={steps} />
+          <AllAppraisals />
         </div>
         <div className="mt-auto pt-6 pr-5">
           <Preferences stacked />
@@ -54,6 +56,7 @@ export function Frame({ document, file, strip, children }: FrameProps) {
             </button>
           </div>
           <Rail steps={steps} onGo={close} />
+          <AllAppraisals />
           <div className="mt-auto pt-6">
             <Preferences stacked />
           </div>
@@ -92,6 +95,15 @@ export function Frame({ document, file, strip, children }: FrameProps) {
         </div>
       </div>
     </div>
+  );
+}
+
+function AllAppraisals() {
+  const { t } = useTranslation();
+  return (
+    <Link to="/" className="mt-4 inline-flex min-h-11 items-center text-mute hover:text-ink">
+      {t('rail.all')}
+    </Link>
   );
 }
 

@@ -1,5 +1,5 @@
 /** An opened appraisal: rail on the left, answer strip on top, the step in the middle. */
-import { useEffect, useMemo } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Outlet } from 'react-router-dom';
 import type { ModelDocument, Question } from '../../../shared/model/document.ts';
@@ -7,14 +7,14 @@ import { hasErrors } from '../../../shared/model/issue.ts';
 import { AnswerStrip } from '../../features/answer-strip/answer-strip.tsx';
 import { formatMoney } from '../../i18n/format.ts';
 import { outcomeWords } from '../../i18n/outcome-words.ts';
-import { answerAt, type Comparison } from '../../store/answer.ts';
+import { answerAt, type Comparison, compareMeans } from '../../store/answer.ts';
 import { type Opened, useBase } from '../../store/appraisal.ts';
 import { useDraws } from '../../store/draws.ts';
 import { FILE_SLUG } from '../../store/opened-file.ts';
 import { type PoisePlace, usePoise } from '../../store/poise.ts';
 import { changeSettings, getSettings, useSettings } from '../../store/settings.ts';
 import { BrokenStrip } from './broken-strip.tsx';
-import type { AppraisalContext, Result } from './context.ts';
+import type { AppraisalContext, Basis, Result } from './context.ts';
 import { Frame } from './frame.tsx';
 
 interface WorkbenchProps {
@@ -43,24 +43,28 @@ export function Workbench({ slug, opened }: WorkbenchProps) {
       </Frame>
     );
   }
-  return (
-    <Whole {...common} opened={opened} document={document} comparison={base.data.comparison} />
-  );
+  return <Whole {...common} opened={opened} document={document} base={base.data.comparison} />;
 }
 
 interface WholeProps extends Omit<AppraisalContext, 'document' | 'result'> {
   readonly opened: WorkbenchProps['opened'];
   readonly document: ModelDocument;
-  readonly comparison: Comparison;
+  /** The base case compared. */
+  readonly base: Comparison;
 }
 
-function Whole({ slug, opened, document, comparison, issues, language }: WholeProps) {
+function Whole({ slug, opened, document, base, issues, language }: WholeProps) {
   const { t } = useTranslation();
   const { question } = document;
   const [place, move] = usePoise(getSettings().thresholds[slug] ?? thresholdInForce(question));
   useKeptThreshold(slug, place);
   const run = useDraws(document);
   const draws = run.state.status === 'done' ? run.state.draws : null;
+  const [basis, setBasis] = useState<Basis>('base');
+  const comparison = useMemo(
+    () => (basis === 'mean' && draws ? compareMeans(draws) : base),
+    [basis, draws, base],
+  );
   const now = useMemo(
     () => answerAt(document, comparison, draws, place.now),
     [document, comparison, draws, place.now],
@@ -77,7 +81,18 @@ function Whole({ slug, opened, document, comparison, issues, language }: WholePr
   const { symbol } = question.currency;
   const thresholdWords = (threshold: number) =>
     t('threshold', { amount: formatMoney(threshold, symbol, language), unit: outcome.per });
-  const result: Result = { document, comparison, now, run, move, names, outcome, thresholdWords };
+  const result: Result = {
+    document,
+    comparison,
+    basis,
+    setBasis,
+    now,
+    run,
+    move,
+    names,
+    outcome,
+    thresholdWords,
+  };
   const strip = (
     <AnswerStrip
       now={now}
@@ -101,7 +116,7 @@ function Whole({ slug, opened, document, comparison, issues, language }: WholePr
 function WaitingStrip() {
   const { t } = useTranslation();
   return (
-    <div className="flex min-h-24 items-center border-b border-rule" role="status">
+    <div className="flex min-h-36 items-center border-b border-rule" role="status">
       <p className="text-mute">{t('strip.working')}</p>
     </div>
   );

@@ -1,6 +1,7 @@
 import { type DragEvent, useRef, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
+import type { ModelDocument } from '../../../shared/model/document.ts';
 import type { Issue } from '../../../shared/model/issue.ts';
 import { IssueList } from '../../components/issue-list.tsx';
 import { FILE_SLUG, openFile } from '../../store/opened-file.ts';
@@ -8,7 +9,13 @@ import { FILE_SLUG, openFile } from '../../store/opened-file.ts';
 type Reading =
   | { readonly status: 'idle' }
   | { readonly status: 'reading' }
-  | { readonly status: 'refused'; readonly file: string; readonly issues: readonly Issue[] }
+  | {
+      readonly status: 'refused';
+      readonly file: string;
+      readonly issues: readonly Issue[];
+      /** What could be read of it, to say places by their names. */
+      readonly draft: ModelDocument | null;
+    }
   | { readonly status: 'unreadable'; readonly file: string };
 
 /** The reader's own model: picked or dropped, read, and opened where nothing is wrong. */
@@ -65,9 +72,10 @@ function useReading(): [Reading, (file: File | undefined) => void] {
     if (!file) return;
     setReading({ status: 'reading' });
     try {
-      const { document, issues } = await openFile(file);
-      if (document) await navigate(`/appraisals/${FILE_SLUG}/results`);
-      else setReading({ status: 'refused', file: file.name, issues });
+      const result = await openFile(file);
+      if (result.document) return await navigate(`/appraisals/${FILE_SLUG}/results`);
+      const { issues, draft } = result;
+      setReading({ status: 'refused', file: file.name, issues, draft });
     } catch {
       // A folder, or a file that was moved or taken away meanwhile.
       setReading({ status: 'unreadable', file: file.name });
@@ -89,7 +97,7 @@ function Outcome({ reading }: { reading: Reading }) {
           <p className="mb-2 font-bold text-clay">
             {t('openFile.refused', { file: reading.file })}
           </p>
-          <IssueList issues={reading.issues} document={null} />
+          <IssueList issues={reading.issues} document={reading.draft} />
         </div>
       )}
     </div>

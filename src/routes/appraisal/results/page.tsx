@@ -1,14 +1,19 @@
+import { useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { toHealth } from '../../../../shared/analysis/direction.ts';
 import { frontierSegments } from '../../../../shared/analysis/frontier-segments.ts';
 import { frontierRows } from '../../../../shared/analysis/incremental.ts';
 import { IssueList } from '../../../components/issue-list.tsx';
 import { usePageTitle } from '../../../components/page-title.ts';
+import { Steady } from '../../../components/steady.tsx';
 import { Frontier } from '../../../features/frontier/frontier.tsx';
 import { IncrementalTable } from '../../../features/incremental/incremental-table.tsx';
 import { type AppraisalContext, type Result, useAppraisalContext } from '../context.ts';
+import { basisWords } from './basis.tsx';
 import { findingWords } from './finding-words.ts';
 import { Weighing } from './weighing.tsx';
+
+const HEADING = 'text-2xl leading-tight font-bold text-balance sm:text-[1.65rem]';
 
 export function Component() {
   const { t } = useTranslation();
@@ -40,18 +45,21 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
   const { document, comparison, now, names, outcome, thresholdWords } = result;
   const { symbol } = document.question.currency;
   const { direction } = document.question.outcome;
-  const segments = frontierSegments(comparison.rows, Number.POSITIVE_INFINITY);
-  const frontier = new Set(frontierRows(comparison.rows).map(({ id }) => id));
-  const order = document.strategies.map(({ id }) => id);
-  // Turning twice gives the outcome back in its own direction.
-  const outcomes = new Map(
-    comparison.rows.map(({ id, health }) => [id, toHealth(health, direction)]),
+  const finding = (strategy: string) =>
+    findingWords(comparison.rows, strategy, { t, names, thresholdWords, symbol, language });
+  const segments = useMemo(
+    () => frontierSegments(comparison.rows, Number.POSITIVE_INFINITY),
+    [comparison],
   );
+  const points = useMemo(() => frontierPoints({ document, comparison }), [document, comparison]);
+  const outcomes = new Map(points.map(({ id, outcome: value }) => [id, value]));
   return (
     <>
-      <h1 className="mt-7 max-w-[36em] text-2xl leading-tight sm:text-[1.65rem]">
-        {findingWords(comparison.rows, now.best, { t, names, thresholdWords, symbol, language })}
-      </h1>
+      <div className="mt-7 max-w-[60rem]">
+        <Steady others={segments.map(({ strategy }) => finding(strategy))} className={HEADING}>
+          <h1 className={HEADING}>{finding(now.best)}</h1>
+        </Steady>
+      </div>
       <Weighing result={result} language={language} />
       <div className="mt-9 grid gap-10 min-[1120px]:grid-cols-[1.25fr_1fr]">
         <section aria-labelledby="incremental-title" className="min-w-0">
@@ -62,6 +70,7 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
             rows={comparison.rows}
             outcomes={outcomes}
             nmb={now.nmb}
+            errors={comparison.errors}
             names={names}
             best={now.best}
             symbol={symbol}
@@ -69,18 +78,14 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
             language={language}
           />
           <p className="mt-2 text-sm text-mute">
-            {t('table.note', { threshold: thresholdWords(now.threshold) })}
+            {t('table.note', {
+              threshold: thresholdWords(now.threshold),
+              basis: basisWords(result, t),
+            })}
           </p>
         </section>
         <Frontier
-          points={comparison.rows.map(({ id, cost }) => ({
-            id,
-            name: names.get(id) ?? id,
-            index: order.indexOf(id),
-            cost,
-            outcome: outcomes.get(id) ?? 0,
-            onFrontier: frontier.has(id),
-          }))}
+          points={points}
           fewerIsBetter={direction === 'fewerIsBetter'}
           symbol={symbol}
           unit={outcome.plural}
@@ -91,6 +96,18 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
       <Notes result={result} issues={issues} />
     </>
   );
+}
+
+function frontierPoints({ document, comparison }: Pick<Result, 'document' | 'comparison'>) {
+  const { direction } = document.question.outcome;
+  const onFrontier = new Set(frontierRows(comparison.rows).map(({ id }) => id));
+  return comparison.rows.map(({ id, cost, health }) => {
+    const index = document.strategies.findIndex((strategy) => strategy.id === id);
+    // Turning twice gives the outcome back in its own direction.
+    const outcome = toHealth(health, direction);
+    const name = document.strategies[index]?.label ?? id;
+    return { id, name, index, cost, outcome, onFrontier: onFrontier.has(id) };
+  });
 }
 
 /** What the reader should know of the runs: warnings, and where the means say otherwise. */

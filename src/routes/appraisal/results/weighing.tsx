@@ -8,11 +8,13 @@ import {
   lever,
   type WeighedPair,
 } from '../../../../shared/analysis/lever.ts';
+import { Steady } from '../../../components/steady.tsx';
 import { Beam } from '../../../features/beam/beam.tsx';
 import { beamScale } from '../../../features/beam/scale.ts';
 import { formatMoney } from '../../../i18n/format.ts';
 import type { Language } from '../../../store/settings.ts';
 import type { Result } from '../context.ts';
+import { BasisChoice } from './basis.tsx';
 
 interface WeighingProps {
   readonly result: Result;
@@ -45,19 +47,29 @@ export function Weighing({ result, language }: WeighingProps) {
   const half = Math.abs(pair.incrementalCost) / 3;
   const weighed = lever(pair, now.threshold, half > 0 ? half : undefined);
   const money = (value: number) => formatMoney(value, currency.symbol, language);
+  const pairWords = (weighing: WeighedPair) =>
+    [
+      t(weighing.incrementalCost < 0 ? 'beam.hookSaves' : 'beam.hookCosts', {
+        strategy: names.get(weighing.strategy),
+        against: names.get(weighing.against),
+      }),
+      t(weighing.incrementalHealth < 0 ? 'beam.poiseLoses' : 'beam.poiseGains', {
+        gained: outcome.gained,
+        lost: outcome.lost,
+      }),
+      t('beam.along', { unit: outcome.per }),
+    ].join(' ');
+  const others = ranges.flatMap(({ strategy }) => {
+    const other = defaultPair(comparison.rows, strategy);
+    return other ? [pairWords(other)] : [];
+  });
   return (
     <section aria-label={t('beam.title')}>
-      <p className="mt-1 mb-4 max-w-[62em] text-mute">
-        {t(weighed.hook === 'lift' ? 'beam.hookSaves' : 'beam.hookCosts', {
-          strategy: names.get(pair.strategy),
-          against: names.get(pair.against),
-        })}{' '}
-        {t(weighed.poise === 'loss' ? 'beam.poiseLoses' : 'beam.poiseGains', {
-          gained: outcome.gained,
-          lost: outcome.lost,
-        })}{' '}
-        {t('beam.along', { unit: outcome.per })}
-      </p>
+      <div className="mt-1 mb-4 max-w-[62em] text-mute">
+        <Steady others={others} className="">
+          <p>{pairWords(pair)}</p>
+        </Steady>
+      </div>
       <Beam
         scale={scale}
         threshold={now.threshold}
@@ -74,20 +86,23 @@ export function Weighing({ result, language }: WeighingProps) {
         language={language}
       />
       <Reading {...{ weighed, pair, result, max: scale.max }} money={money} />
-      <div className="mt-4 flex flex-wrap items-center gap-2">
-        <span className="mr-1 text-sm text-mute">{t('beam.notches')}</span>
-        {thresholds.map(({ id, label, value }) => (
-          <button
-            key={id}
-            type="button"
-            aria-pressed={value === now.threshold}
-            className="control gap-2 px-3 text-left text-sm aria-pressed:border-brass aria-pressed:bg-brass-soft"
-            onClick={() => move({ to: value, starts: true })}
-          >
-            <span className="font-bold">{money(value)}</span>
-            {label}
-          </button>
-        ))}
+      <div className="mt-4 flex flex-wrap gap-x-8 gap-y-3">
+        <div className="flex flex-wrap items-center gap-2">
+          <span className="mr-1 text-sm text-mute">{t('beam.notches')}</span>
+          {thresholds.map(({ id, label, value }) => (
+            <button
+              key={id}
+              type="button"
+              aria-pressed={value === now.threshold}
+              className="control gap-2 px-3 text-left text-sm aria-pressed:border-brass aria-pressed:bg-brass-soft"
+              onClick={() => move({ to: value, starts: true })}
+            >
+              <span className="font-bold">{money(value)}</span>
+              {label}
+            </button>
+          ))}
+        </div>
+        <BasisChoice result={result} />
       </div>
     </section>
   );
