@@ -2,16 +2,20 @@ import { describe, expect, it } from 'vitest';
 import { toCsv } from '../../shared/export/csv.ts';
 
 describe('toCsv', () => {
+  it('writes lines of fields', () => {
+    const rows = [
+      ['Strategy', 'Cost'],
+      ['Care as now', 412.5],
+    ];
+    expect(toCsv(rows)).toBe('Strategy,Cost\r\nCare as now,412.5\r\n');
+  });
+
   // RFC 4180, section 2: lines end in CR LF (1), fields parted by commas (4), quotes
   // around line breaks, double quotes and commas (6), a double quote doubled (7).
-  it('follows RFC 4180', () => {
-    expect(
-      toCsv([
-        ['aaa', 'b bb'],
-        ['b\r\nbb', 'c,c'],
-      ]),
-    ).toBe('aaa,b bb\r\n"b\r\nbb","c,c"\r\n');
-    expect(toCsv([['b"bb', '']])).toBe('"b""bb",\r\n');
+  it('quotes what would break a line', () => {
+    expect(toCsv([['Register, reminders', 'a "new" one', 'two\nlines', 'b\r\nbb']])).toBe(
+      '"Register, reminders","a ""new"" one","two\nlines","b\r\nbb"\r\n',
+    );
   });
 
   it('writes numbers in full, and nothing for null', () => {
@@ -24,6 +28,6 @@ describe('toCsv', () => {
   });
 
   it('lets no label pass for a formula', () => {
-    expect(toCsv([['=1+1', '-a', '@b', '+c', 'x=1']])).toBe("'=1+1,'-a,'@b,'+c,x=1\r\n");
+    expect(toCsv([['=1+1', '-a', '@b', '+c', 'x=1', -5]])).toBe("'=1+1,'-a,'@b,'+c,x=1,-5\r\n");
   });
 });
