@@ -6,7 +6,7 @@ import { textWidth } from '../../components/text-width.ts';
 import { useWidth } from '../../components/use-width.ts';
 import { formatNumber } from '../../i18n/format.ts';
 import type { Language } from '../../store/settings.ts';
-import { type Axis, axis } from './axis.ts';
+import { type Axis, axis } from '../../components/axis.ts';
 import { placeLabels } from './place-labels.ts';
 
 export interface FrontierPoint {

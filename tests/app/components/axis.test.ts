@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { expect, it } from 'vitest';
-import { axis } from '../../../../src/features/frontier/axis.ts';
+import { axis } from '../../../src/components/axis.ts';
 
 it('spans the data on round numbers with room at both ends', () => {
   expect(axis([412, 438, 561, 590], 6).ticks).toEqual([350, 400, 450, 500, 550, 600, 650]);
