@@ -6,6 +6,9 @@ import Dexie, { type EntityTable, type Table } from 'dexie';
 import type { ModelDocument } from '../../shared/model/document.ts';
 import type { Edit } from '../../shared/model/edit/edit.ts';
 import { setConnection } from './connection.ts';
+import { StoreError } from './store-error.ts';
+
+const SCHEMA_VERSION = 1;
 
 export type Source = `example:${string}` | `template:${string}` | `copy:${string}` | 'file' | 'empty';
 
@@ -84,7 +87,7 @@ export class AppDatabase extends Dexie {
   constructor(name = 'steelyard') {
     // Strict: an edit called saved has reached the disk, and survives a power cut.
     super(name, { chromeTransactionDurability: 'strict', cache: 'disabled' });
-    this.version(1).stores({
+    this.version(SCHEMA_VERSION).stores({
       appraisals: 'id, openedAt',
       versions: 'digest, appraisal',
       journal: '[appraisal+seq], appraisal',
@@ -101,7 +104,14 @@ export class AppDatabase extends Dexie {
       setConnection('blocked');
       return false;
     });
-    this.on('ready', () => setConnection('open'));
+    this.on('ready', () => {
+      // Dexie would open a newer schema as if it were its own: we do not write into it.
+      if (Math.floor(this.backendDB().version / 10) > SCHEMA_VERSION) {
+        setConnection('outdated');
+        throw new StoreError('store.outdated');
+      }
+      setConnection('open');
+    });
   }
 }
 
