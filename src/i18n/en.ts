@@ -1,4 +1,5 @@
 import { issues } from './issues-en.ts';
+import { shell } from './shell-en.ts';
 
 /** Every word of the interface, in English: the measure of what other languages must have. */
 export const en = {
@@ -294,4 +295,5 @@ export const en = {
   caution:
     'Steelyard supports deliberation by trained people; it gives no clinical advice. National guidelines, local rules and licensed practice come first. Have a model reviewed before a decision rests on it.',
   issues,
+  ...shell,
 };

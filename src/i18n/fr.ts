@@ -1,4 +1,5 @@
 import { issues } from './issues-fr.ts';
+import { shell } from './shell-fr.ts';
 import type { Words } from './words.ts';
 
 /** Tous les mots de l'interface, en français. */
@@ -304,4 +305,5 @@ export const fr: Words = {
   caution:
     'Steelyard aide à la délibération de personnes formées\u00A0; il ne donne aucun avis clinique. Les recommandations nationales, les règles locales et la pratique autorisée passent d’abord. Faites relire un modèle avant qu’une décision ne s’y appuie.',
   issues,
+  ...shell,
 };

@@ -1,0 +1,50 @@
+/** Words of the shell: the work and its state, the list of appraisals, history, settings. */
+export const shell = {
+  shell: {
+    cannotOpen: 'This appraisal could not be opened',
+    tryAgain: 'Try again',
+    undo: 'Undo',
+    redo: 'Redo',
+    undoWhat: 'Undo: {{what}}',
+    redoWhat: 'Redo: {{what}}',
+    example: 'Worked example: the first change makes it an appraisal of yours',
+    saved: 'Saved on this device',
+    saving: 'Saving…',
+    failed: 'Could not be saved: {{why}}',
+    retry: 'Try again',
+    export: 'Export a file',
+    dismiss: 'Close',
+    restored: 'Brought back',
+    settings: 'Settings',
+    keys: 'Keys',
+  },
+  store: {
+    full: 'This device has no room left. Free some space, or export the appraisal as a file.',
+    unavailable:
+      'This browser keeps nothing here, as in some private windows. Export the appraisal as a file before you close the page.',
+    outdated: 'A newer version of Steelyard is open in another tab. Reload this page.',
+    deleted: 'The appraisal was deleted in another tab.',
+    failed: 'The device’s store gave no answer. Try again, or export the appraisal as a file.',
+  },
+  connection: {
+    blocked: 'A tab with an older version of Steelyard holds the store: close it to go on.',
+    outdated:
+      'Another tab put a newer version of Steelyard in use. Changes made here are no longer kept: reload.',
+    reload: 'Reload',
+  },
+  draft: {
+    covered:
+      'Another tab changed the same thing. Your change stands: “{{label}}”. Undo brings the other back.',
+    dropped: 'Your change does not fit any more and was left out: “{{label}}”.',
+    unreadable_one: '{{count}} change kept on this device fits no longer and was passed over.',
+    unreadable_other: '{{count}} changes kept on this device fit no longer and were passed over.',
+  },
+  form: {
+    required: 'Something has to stand here.',
+    noNumber: 'This is not a number.',
+    min: 'It must be {{limit}} or more.',
+    max: 'It must be {{limit}} or less.',
+    above: 'It must be above {{limit}}.',
+    whole: 'It must be a whole number.',
+  },
+};

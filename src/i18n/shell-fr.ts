@@ -1,0 +1,59 @@
+/** Mots de la coquille : le travail et son état, la liste, l’historique, les réglages. */
+import type { shell as english } from './shell-en.ts';
+import type { Words } from './words.ts';
+
+export const shell: Pick<Words, keyof typeof english> = {
+  shell: {
+    cannotOpen: 'Cette évaluation n’a pas pu être ouverte',
+    tryAgain: 'Réessayer',
+    undo: 'Annuler',
+    redo: 'Rétablir',
+    undoWhat: 'Annuler\u00A0: {{what}}',
+    redoWhat: 'Rétablir\u00A0: {{what}}',
+    example: 'Exemple traité\u00A0: la première modification en fait une évaluation à vous',
+    saved: 'Enregistré sur cet appareil',
+    saving: 'Enregistrement…',
+    failed: 'N’a pas pu être enregistré\u00A0: {{why}}',
+    retry: 'Réessayer',
+    export: 'Exporter un fichier',
+    dismiss: 'Fermer',
+    restored: 'Rétablie',
+    settings: 'Réglages',
+    keys: 'Touches',
+  },
+  store: {
+    full: 'Il n’y a plus de place sur cet appareil. Libérez de l’espace, ou exportez l’évaluation dans un fichier.',
+    unavailable:
+      'Ce navigateur ne garde rien ici, comme certaines fenêtres privées. Exportez l’évaluation dans un fichier avant de fermer la page.',
+    outdated:
+      'Une version plus récente de Steelyard est ouverte dans un autre onglet. Rechargez cette page.',
+    deleted: 'L’évaluation a été supprimée dans un autre onglet.',
+    failed:
+      'Le stockage de l’appareil ne répond pas. Réessayez, ou exportez l’évaluation dans un fichier.',
+  },
+  connection: {
+    blocked:
+      'Un onglet avec une version plus ancienne de Steelyard tient le stockage\u00A0: fermez-le pour continuer.',
+    outdated:
+      'Un autre onglet a mis en service une version plus récente de Steelyard. Ce qui est modifié ici n’est plus gardé\u00A0: rechargez.',
+    reload: 'Recharger',
+  },
+  draft: {
+    covered:
+      'Un autre onglet a modifié la même chose. Votre modification tient\u00A0: «\u00A0{{label}}\u00A0». Annuler rétablit l’autre.',
+    dropped:
+      'Votre modification ne convient plus et n’a pas été retenue\u00A0: «\u00A0{{label}}\u00A0».',
+    unreadable_one:
+      '{{count}} modification gardée sur cet appareil ne convient plus et a été laissée de côté.',
+    unreadable_other:
+      '{{count}} modifications gardées sur cet appareil ne conviennent plus et ont été laissées de côté.',
+  },
+  form: {
+    required: 'Il faut écrire quelque chose ici.',
+    noNumber: 'Ce n’est pas un nombre.',
+    min: 'Il faut {{limit}} ou plus.',
+    max: 'Il faut {{limit}} ou moins.',
+    above: 'Il faut plus de {{limit}}.',
+    whole: 'Il faut un nombre entier.',
+  },
+};
