@@ -18,7 +18,7 @@ export function siteOf(formula: StrategyFormula, path: Path, strategy: string): 
 }
 
 /** The row by which a strategy leaves a state, with its index; null where nobody leaves. */
-export function rowOf(
+function rowOf(
   document: ModelDocument,
   strategy: string,
   from: string,
