@@ -10,7 +10,12 @@ import { StoreError } from './store-error.ts';
 
 const SCHEMA_VERSION = 1;
 
-export type Source = `example:${string}` | `template:${string}` | `copy:${string}` | 'file' | 'empty';
+export type Source =
+  | `example:${string}`
+  | `template:${string}`
+  | `copy:${string}`
+  | 'file'
+  | 'empty';
 
 export interface AppraisalRow {
   readonly id: string;

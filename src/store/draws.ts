@@ -38,7 +38,7 @@ export function useDraws(document: ModelDocument | null): DrawsRun {
     const tell = (next: DrawsState) => {
       if (controller.current === mine && !mine.signal.aborted) setState(next);
     };
-    void simulate(document, mine.signal, tell).then(tell);
+    void drawDocument(document, mine.signal, tell).then(tell);
   }, [document]);
   const stop = useCallback(() => {
     controller.current?.abort();
@@ -51,7 +51,8 @@ export function useDraws(document: ModelDocument | null): DrawsRun {
   return { state, run, stop };
 }
 
-async function simulate(
+/** Draws what the document's analysis asks for; an abort ends as `failed`, with no issues. */
+export async function drawDocument(
   document: ModelDocument,
   signal: AbortSignal,
   tell: (state: DrawsState) => void,

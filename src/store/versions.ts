@@ -3,8 +3,8 @@
  * digest of what it says. They are only ever added.
  */
 import { useLiveQuery } from 'dexie-react-hooks';
-import type { ModelDocument } from '../../shared/model/document.ts';
 import { digestOf } from '../../shared/model/digest.ts';
+import type { ModelDocument } from '../../shared/model/document.ts';
 import { type AppDatabase, database, type VersionRow } from './database.ts';
 
 export interface NewVersion {

@@ -1,7 +1,9 @@
 import { expose, transfer } from 'comlink';
 import { type Engine, prepare } from '../../shared/engine/engine.ts';
+import { digestOf } from '../../shared/model/digest.ts';
 import { DocumentError } from '../../shared/model/issue.ts';
-import type { Reply, Simulator } from './simulator.ts';
+import { answerDraft } from './answer-draft.ts';
+import type { DraftSimulator, Reply } from './simulator.ts';
 
 let ready: { key: string; engine: Engine } | null = null;
 
@@ -19,14 +21,14 @@ function reply<T>(work: () => T): Reply<T> {
   }
 }
 
-const simulator: Simulator = {
+const simulator: DraftSimulator = {
   load: (key, document) =>
     reply(() => {
       ready = null;
       ready = { key, engine: prepare(document) };
       return null;
     }),
-  base: (key) => reply(() => engineFor(key).base()),
+  base: (key) => reply(() => engineFor(key).base({ trace: true })),
   draws: (key, settings, from, to) => {
     const answer = reply(() => engineFor(key).draws(settings, from, to));
     if (!answer.ok) return answer;
@@ -36,6 +38,8 @@ const simulator: Simulator = {
       [...cost, ...outcome].map((column) => column.buffer),
     );
   },
+  answer: answerDraft,
+  digest: digestOf,
 };
 
 expose(simulator);

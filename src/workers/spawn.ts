@@ -1,27 +1,25 @@
 import { releaseProxy, wrap } from 'comlink';
-import type { Simulator } from './simulator.ts';
+import type { DraftSimulator, Simulator } from './simulator.ts';
 
 /** The simulator from the other side of the thread: every answer is a promise. */
-export type RemoteSimulator = {
-  readonly [K in keyof Simulator]: (
-    ...args: Parameters<Simulator[K]>
-  ) => Promise<ReturnType<Simulator[K]>>;
+export type RemoteOf<S extends { [K in keyof S]: (...args: never[]) => unknown }> = {
+  readonly [K in keyof S]: (...args: Parameters<S[K]>) => Promise<ReturnType<S[K]>>;
 };
 
 /** A worker as the pool sees it. */
-export interface SimulatorWorker {
-  readonly remote: RemoteSimulator;
+export interface SimulatorWorker<R = RemoteOf<Simulator>> {
+  readonly remote: R;
   /** Rejects when the worker cannot start or breaks down; Comlink would wait for ever. */
   readonly failed: Promise<never>;
   stop(): void;
 }
 
-export function spawnSimulator(): SimulatorWorker {
+export function spawnSimulator(): SimulatorWorker<RemoteOf<DraftSimulator>> {
   const worker = new Worker(new URL('./simulator.worker.ts', import.meta.url), {
     type: 'module',
     name: 'simulator',
   });
-  const remote = wrap<Simulator>(worker);
+  const remote = wrap<DraftSimulator>(worker);
   const failed = new Promise<never>((_, reject) => {
     worker.addEventListener('error', (event) => {
       event.preventDefault();

@@ -14,7 +14,7 @@ import { database } from '../../../src/store/database.ts';
 import { putSetting } from '../../../src/store/device-settings.ts';
 import { openAppraisal } from '../../../src/store/open-sessions.ts';
 import { tinyDocument } from '../../fixtures/tiny-document.ts';
-import { breakWrites, freshName, openTab, sessionOf, setValue, until, valueOf } from './support.ts';
+import { breakWrites, freshName, openTab, sessionOf, setValue, until, valueIn } from './support.ts';
 
 const origin = { document: tinyDocument(), source: 'empty' } as const;
 
@@ -57,7 +57,7 @@ describe('an appraisal', () => {
     const copy = await duplicateAppraisal(id, 'A copy', db);
     expect(copy).toMatchObject({ title: 'A copy', source: `copy:${id}` });
     const session = await sessionOf(db, copy.id);
-    expect(valueOf(session.getState().document, 'p_die')).toBe(0.3);
+    expect(valueIn(session.getState().document, 'p_die')).toBe(0.3);
     expect((await listAppraisals(db)).length).toBe(2);
   });
 
@@ -76,7 +76,7 @@ describe('an appraisal', () => {
     expect(await deleteAppraisal(id, db)).toBeNull();
     if (deleted) await restoreAppraisal(deleted, db);
     await until(() => open.getState().work.status === 'saved');
-    expect(valueOf((await sessionOf(db, id)).getState().document, 'p_die')).toBe(0.4);
+    expect(valueIn((await sessionOf(db, id)).getState().document, 'p_die')).toBe(0.4);
   });
 
   it('cannot be made on a full device: a coded error, and nothing half written', async () => {

@@ -37,10 +37,7 @@ describe('a document as a file', () => {
     const db = openTab();
     const broken = tinyDocument();
     const question = { ...broken.question, comparator: 'nobody' };
-    const { appraisal, issues } = await importText(
-      await exportText({ ...broken, question }),
-      db,
-    );
+    const { appraisal, issues } = await importText(await exportText({ ...broken, question }), db);
     expect(issues.some(({ severity }) => severity === 'error')).toBe(true);
     const session = await sessionOf(db, appraisal?.id ?? '');
     expect(session.getState().document.question.comparator).toBe('nobody');

@@ -4,7 +4,6 @@
  */
 import { describe, expect, it } from 'vitest';
 import { digestOf } from '../../../shared/model/digest.ts';
-import type { ModelDocument } from '../../../shared/model/document.ts';
 import { breakWrites, freshName, madeAppraisal, openTab, sessionOf, setTitle } from './support.ts';
 
 const TEXT = 'Is the treatment worth what it costs in Kesanda?';

@@ -13,10 +13,10 @@ import {
   setTitle,
   setValue,
   until,
-  valueOf,
+  valueIn,
 } from './support.ts';
 
-const value = (session: Session, id = 'p_die') => valueOf(session.getState().document, id);
+const value = (session: Session, id = 'p_die') => valueIn(session.getState().document, id);
 
 describe('an edit', () => {
   it('is in force at once, saving, then saved', async () => {
@@ -139,7 +139,10 @@ describe('a version', () => {
     const version = await session.saveVersion('Higher risk');
     expect(version).toMatchObject({ parents: [first], message: 'Higher risk', appraisal: id });
     expect(version.documentDigest).toBe(digestOf(session.getState().document));
-    expect(session.getState()).toMatchObject({ changed: false, appraisal: { head: version.digest } });
+    expect(session.getState()).toMatchObject({
+      changed: false,
+      appraisal: { head: version.digest },
+    });
     const again = await sessionOf(openTab(name), id);
     expect(value(again)).toBe(0.2);
     await again.undo();

@@ -2,12 +2,12 @@
 import Dexie from 'dexie';
 import { IDBKeyRange, indexedDB } from 'fake-indexeddb';
 import { onTestFinished } from 'vitest';
+import type { ModelDocument } from '../../../shared/model/document.ts';
+import type { Edit } from '../../../shared/model/edit/edit.ts';
 import { createAppraisal } from '../../../src/store/appraisals.ts';
 import { AppDatabase } from '../../../src/store/database.ts';
 import { readDraft } from '../../../src/store/journal.ts';
 import { Session } from '../../../src/store/session.ts';
-import type { ModelDocument } from '../../../shared/model/document.ts';
-import type { Edit } from '../../../shared/model/edit/edit.ts';
 import { tinyDocument } from '../../fixtures/tiny-document.ts';
 
 // Whatever was imported first: Dexie looks for the browser's own when it loads.
@@ -49,7 +49,7 @@ export function setTitle(value: string): Edit[] {
   return [{ type: 'set', at: ['question', 'title'], value }];
 }
 
-export function valueOf(document: ModelDocument, id: string): number | undefined {
+export function valueIn(document: ModelDocument, id: string): number | undefined {
   return document.parameters.find((parameter) => parameter.id === id)?.value;
 }
 

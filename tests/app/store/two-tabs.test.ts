@@ -12,7 +12,7 @@ import {
   setTitle,
   setValue,
   until,
-  valueOf,
+  valueIn,
 } from './support.ts';
 
 async function twoTabs(): Promise<{ id: string; name: string; a: Session; b: Session }> {
@@ -35,10 +35,10 @@ describe('two tabs', () => {
   it('hear of each other’s edits', async () => {
     const { a, b } = await twoTabs();
     await a.edit(setValue('p_die', 0.2), 'Value');
-    await until(() => valueOf(b.getState().document, 'p_die') === 0.2);
+    await until(() => valueIn(b.getState().document, 'p_die') === 0.2);
     expect(b.getState().undo?.label).toBe('Value');
     await b.undo();
-    await until(() => valueOf(a.getState().document, 'p_die') === 0.1);
+    await until(() => valueIn(a.getState().document, 'p_die') === 0.1);
     expect(a.getState().redo?.label).toBe('Value');
   });
 
@@ -54,13 +54,13 @@ describe('two tabs', () => {
     await agreed(a, b);
     const { document } = (await sessionOf(openTab(name), id)).getState();
     expect(document.question.title).toBe('By b');
-    expect(['p_die', 'u_alive', 'rr_die'].map((p) => valueOf(document, p))).toEqual([
+    expect(['p_die', 'u_alive', 'rr_die'].map((p) => valueIn(document, p))).toEqual([
       0.2, 0.7, 0.5,
     ]);
     expect([...a.getState().notices, ...b.getState().notices]).toEqual([]);
     for (let steps = 0; steps < 4; steps++) await a.undo();
     expect(a.getState().undo).toBeNull();
-    expect(valueOf(a.getState().document, 'p_die')).toBe(0.1);
+    expect(valueIn(a.getState().document, 'p_die')).toBe(0.1);
   });
 
   it('changing the same field are told, and the edit that is covered comes back by undo', async () => {
@@ -72,9 +72,9 @@ describe('two tabs', () => {
     await agreed(a, b);
     const notices = [...a.getState().notices, ...b.getState().notices];
     expect(notices.map(({ code }) => code)).toEqual(['draft.covered']);
-    const last = valueOf(a.getState().document, 'p_die');
+    const last = valueIn(a.getState().document, 'p_die');
     await a.undo();
-    expect(valueOf(a.getState().document, 'p_die')).toBe(last === 0.3 ? 0.2 : 0.3);
+    expect(valueIn(a.getState().document, 'p_die')).toBe(last === 0.3 ? 0.2 : 0.3);
   });
 
   it('an edit of what the other deleted is left out, and told', async () => {
@@ -92,27 +92,24 @@ describe('two tabs', () => {
     } else {
       expect(b.getState().notices).toMatchObject([{ code: 'draft.dropped', label: 'Price' }]);
     }
-    expect(valueOf(a.getState().document, 'c_year')).toBeUndefined();
+    expect(valueIn(a.getState().document, 'c_year')).toBeUndefined();
   });
 
   it('an undo does not take back what the other built upon', async () => {
     const { a, b } = await twoTabs();
     await a.edit(setValue('p_die', 0.2), 'First');
-    await until(() => valueOf(b.getState().document, 'p_die') === 0.2);
+    await until(() => valueIn(b.getState().document, 'p_die') === 0.2);
     await Promise.all([b.edit(setValue('p_die', 0.3), 'Second'), a.undo()]);
     await agreed(a, b);
     const codes = [...a.getState().notices, ...b.getState().notices].map(({ code }) => code);
     expect(codes).toHaveLength(1);
     // Whoever came second was told: an undo gives way, an edit covers.
-    expect(valueOf(a.getState().document, 'p_die')).toBe(0.3);
+    expect(valueIn(a.getState().document, 'p_die')).toBe(0.3);
   });
 
   it('make versions one upon the other', async () => {
     const { id, name, a, b } = await twoTabs();
-    await Promise.all([
-      a.edit(setValue('p_die', 0.2), 'Value'),
-      b.edit(setTitle('By b'), 'Title'),
-    ]);
+    await Promise.all([a.edit(setValue('p_die', 0.2), 'Value'), b.edit(setTitle('By b'), 'Title')]);
     const [one, two] = await Promise.all([a.saveVersion('a'), b.saveVersion('b')]);
     const versions = await listVersions(id, openTab(name));
     // Both asked for the same document, so there is one version of it besides the first.
