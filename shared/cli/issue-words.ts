@@ -70,6 +70,15 @@ export const ISSUE_WORDS: Readonly<Record<string, string>> = {
   'document.tooSmall': 'must be {minimum} or more',
   'document.wrongFormat': 'not a document of this program: format has to be {expected}',
 
+  'edit.badValue': 'a value that cannot be put there',
+  'edit.hostileKey': 'the key {key} is not allowed anywhere in a document',
+  'edit.idFixed': '{id} keeps its id',
+  'edit.idNotUnique': 'several items are called {id}',
+  'edit.idTaken': 'there is an item {id} already',
+  'edit.noSuchItem': 'there is no item {id}',
+  'edit.noSuchPlace': 'there is no such place in the document',
+  'edit.notAField': 'only a field can be unset',
+
   'fit.counts': '{events} events among {n} persons cannot be: whole numbers, 0 to n',
   'fit.improper': '{events} events among {n} leave no distribution without a prior',
   'fit.interval': 'no interval: {lower} to {upper}',

@@ -59,6 +59,16 @@ export const issues = {
     tooSmall: 'The value must be {{minimum}} or more.',
     wrongFormat: 'This is not a Steelyard model: its “format” should be {{expected}}.',
   },
+  edit: {
+    badValue: 'This value cannot be put here.',
+    hostileKey: 'The name {{key}} may not be used: it reaches into the program itself.',
+    idFixed: '{{id}} keeps its id.',
+    idNotUnique: 'Several things are called {{id}}: the list has to be mended as a whole.',
+    idTaken: 'Something is called {{id}} already.',
+    noSuchItem: 'There is no {{id}} any more: it was probably removed elsewhere.',
+    noSuchPlace: 'The place that was to be changed is there no more.',
+    notAField: 'This cannot be left empty.',
+  },
   formula: {
     badNumber: '{{text}} is not a number.',
     chainedComparison: 'Two comparisons in a row: join them with “and”.',

@@ -64,6 +64,16 @@ export const issues = {
     wrongFormat:
       'Ce n’est pas un modèle Steelyard\u00A0: son «\u00A0format\u00A0» devrait être {{expected}}.',
   },
+  edit: {
+    badValue: 'Cette valeur ne peut pas être placée ici.',
+    hostileKey: 'Le nom {{key}} est interdit : il touche au programme lui-même.',
+    idFixed: '{{id}} garde son identifiant.',
+    idNotUnique: 'Plusieurs éléments s’appellent {{id}} : la liste est à corriger en entier.',
+    idTaken: 'Un élément s’appelle déjà {{id}}.',
+    noSuchItem: '{{id}} n’existe plus : il a sans doute été supprimé ailleurs.',
+    noSuchPlace: 'L’endroit à modifier n’existe plus.',
+    notAField: 'Ceci ne peut pas rester vide.',
+  },
   formula: {
     badNumber: '{{text}} n’est pas un nombre.',
     chainedComparison: 'Deux comparaisons à la suite\u00A0: reliez-les par «\u00A0and\u00A0».',
