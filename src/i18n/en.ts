@@ -1,5 +1,8 @@
+import { charts } from './charts-en.ts';
 import { issues } from './issues-en.ts';
+import { modelling } from './modelling-en.ts';
 import { shell } from './shell-en.ts';
+import { uncertainty } from './uncertainty-en.ts';
 
 /** Every word of the interface, in English: the measure of what other languages must have. */
 export const en = {
@@ -26,11 +29,6 @@ export const en = {
     body: 'The address may be mistyped, or belong to another version of Steelyard.',
     back: 'See all appraisals',
   },
-  fileGone: {
-    title: 'The file has to be opened again',
-    body: 'A model opened from a file is held until the page is closed or reloaded. The file itself is as it was: choose it again on the first page.',
-    back: 'Open the file again',
-  },
   crashed: {
     title: 'This page could not be shown',
     body: 'Nothing is lost. If a new version was put in use in another tab, reloading mends this.',
@@ -47,7 +45,6 @@ export const en = {
     strategies_other: '{{count}} strategies',
   },
   openFile: {
-    title: 'Your own model',
     choose: 'Open a model file',
     body: 'A Steelyard model is one JSON file. Choose it, or drop it here: it is read on this device and sent nowhere.',
     reading: 'Reading the file…',
@@ -56,10 +53,12 @@ export const en = {
       '{{file}} could not be read from this device. Check that it is still there, and choose it again.',
   },
   rail: { label: 'Steps of the appraisal', open: 'Steps', close: 'Close', all: 'All appraisals' },
-  steps: { question: 'Question', evidence: 'Evidence', results: 'Results' },
-  state: {
-    example: 'Worked example, on this device',
-    file: '{{file}}, open until this page is closed',
+  steps: {
+    question: 'Question',
+    evidence: 'Evidence',
+    results: 'Results',
+    uncertainty: 'Uncertainty',
+    history: 'History',
   },
   threshold: '{{amount}} per {{unit}}',
   outcome: {
@@ -295,5 +294,8 @@ export const en = {
   caution:
     'Steelyard supports deliberation by trained people; it gives no clinical advice. National guidelines, local rules and licensed practice come first. Have a model reviewed before a decision rests on it.',
   issues,
+  ...modelling,
+  charts,
+  uncertainty,
   ...shell,
 };

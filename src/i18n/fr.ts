@@ -1,5 +1,8 @@
+import { charts } from './charts-fr.ts';
 import { issues } from './issues-fr.ts';
+import { modelling } from './modelling-fr.ts';
 import { shell } from './shell-fr.ts';
+import { uncertainty } from './uncertainty-fr.ts';
 import type { Words } from './words.ts';
 
 /** Tous les mots de l'interface, en français. */
@@ -27,11 +30,6 @@ export const fr: Words = {
     body: 'L’adresse est peut-être mal saisie, ou vient d’une autre version de Steelyard.',
     back: 'Voir toutes les évaluations',
   },
-  fileGone: {
-    title: 'Le fichier est à rouvrir',
-    body: 'Un modèle ouvert depuis un fichier est gardé jusqu’à la fermeture ou au rechargement de la page. Le fichier lui-même est intact\u00A0: choisissez-le à nouveau sur la première page.',
-    back: 'Rouvrir le fichier',
-  },
   crashed: {
     title: 'Cette page n’a pas pu être affichée',
     body: 'Rien n’est perdu. Si une nouvelle version a été mise en service dans un autre onglet, un rechargement suffit.',
@@ -48,7 +46,6 @@ export const fr: Words = {
     strategies_other: '{{count}} stratégies',
   },
   openFile: {
-    title: 'Votre propre modèle',
     choose: 'Ouvrir un fichier de modèle',
     body: 'Un modèle Steelyard est un seul fichier JSON. Choisissez-le ou déposez-le ici\u00A0: il est lu sur cet appareil et n’est envoyé nulle part.',
     reading: 'Lecture du fichier…',
@@ -62,10 +59,12 @@ export const fr: Words = {
     close: 'Fermer',
     all: 'Toutes les évaluations',
   },
-  steps: { question: 'Question', evidence: 'Données', results: 'Résultats' },
-  state: {
-    example: 'Exemple travaillé, sur cet appareil',
-    file: '{{file}}, ouvert jusqu’à la fermeture de la page',
+  steps: {
+    question: 'Question',
+    evidence: 'Données',
+    results: 'Résultats',
+    uncertainty: 'Incertitude',
+    history: 'Historique',
   },
   threshold: '{{amount}} par {{unit}}',
   outcome: {
@@ -305,5 +304,8 @@ export const fr: Words = {
   caution:
     'Steelyard aide à la délibération de personnes formées\u00A0; il ne donne aucun avis clinique. Les recommandations nationales, les règles locales et la pratique autorisée passent d’abord. Faites relire un modèle avant qu’une décision ne s’y appuie.',
   issues,
+  ...modelling,
+  charts,
+  uncertainty,
   ...shell,
 };

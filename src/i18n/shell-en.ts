@@ -47,4 +47,46 @@ export const shell = {
     above: 'It must be above {{limit}}.',
     whole: 'It must be a whole number.',
   },
+  own: {
+    title: 'Your appraisals',
+    opened: 'Opened {{time}}',
+    rename: 'Rename',
+    duplicate: 'Duplicate',
+    export: 'Export',
+    delete: 'Delete',
+    deleted: 'Deleted: {{title}}.',
+    copyOf: '{{title}} (copy)',
+    newTitle: 'New title',
+    save: 'Rename',
+  },
+  begin: {
+    title: 'Begin an appraisal of your own',
+    lead: 'A template is a small model that runs at once. Its numbers are placeholders, marked as such, for you to replace.',
+    templates: {
+      empty: {
+        name: 'Empty',
+        body: 'Begin with the question; the model has one state and no numbers yet.',
+      },
+      'two-state': {
+        name: 'Two states',
+        body: 'Alive and dead, with an effect on dying.',
+      },
+      progressive: {
+        name: 'Three states, progressive',
+        body: 'Stable, progressed, dead: an illness that gets worse.',
+      },
+      relapsing: {
+        name: 'Remission and relapse',
+        body: 'An illness that comes and goes.',
+      },
+      screening: {
+        name: 'Screening, with a test at the start',
+        body: 'A short decision tree of who is found, then the years that follow.',
+      },
+      'acute-chronic': {
+        name: 'Acute, then chronic',
+        body: 'An illness over within the first cycle, and what it leaves behind.',
+      },
+    },
+  },
 };

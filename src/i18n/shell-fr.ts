@@ -56,4 +56,46 @@ export const shell: Pick<Words, keyof typeof english> = {
     above: 'Il faut plus de {{limit}}.',
     whole: 'Il faut un nombre entier.',
   },
+  own: {
+    title: 'Vos évaluations',
+    opened: 'Ouverte le {{time}}',
+    rename: 'Renommer',
+    duplicate: 'Dupliquer',
+    export: 'Exporter',
+    delete: 'Supprimer',
+    deleted: 'Supprimée\u00A0: {{title}}.',
+    copyOf: '{{title}} (copie)',
+    newTitle: 'Nouveau titre',
+    save: 'Renommer',
+  },
+  begin: {
+    title: 'Commencer une évaluation à vous',
+    lead: 'Un canevas est un petit modèle qui tourne aussitôt. Ses nombres sont provisoires et signalés comme tels\u00A0: à vous de les remplacer.',
+    templates: {
+      empty: {
+        name: 'Vide',
+        body: 'Commencer par la question\u00A0; le modèle a un seul état et aucun nombre encore.',
+      },
+      'two-state': {
+        name: 'Deux états',
+        body: 'Vivant et décédé, avec un effet sur la mortalité.',
+      },
+      progressive: {
+        name: 'Trois états, progressif',
+        body: 'Stable, aggravé, décédé\u00A0: une maladie qui s’aggrave.',
+      },
+      relapsing: {
+        name: 'Rémission et rechute',
+        body: 'Une maladie qui va et vient.',
+      },
+      screening: {
+        name: 'Dépistage, avec un test au départ',
+        body: 'Un court arbre de décision dit qui est trouvé, puis viennent les années qui suivent.',
+      },
+      'acute-chronic': {
+        name: 'Aiguë, puis chronique',
+        body: 'Une maladie terminée dès le premier cycle, et ce qu’elle laisse.',
+      },
+    },
+  },
 };

@@ -35,12 +35,14 @@ export function RootLoading() {
 
 /** A new page starts at its top, with the focus at its content, as a full load would. */
 function useFocusOnMove(): void {
-  const { pathname } = useLocation();
+  const { pathname, state } = useLocation();
   const before = useRef(pathname);
   useEffect(() => {
     if (before.current === pathname) return;
     before.current = pathname;
+    // The same page under another name: whoever types in it is not disturbed.
+    if (state?.keepFocus) return;
     window.scrollTo(0, 0);
     document.getElementById('main')?.focus({ preventScroll: true });
-  }, [pathname]);
+  }, [pathname, state]);
 }

@@ -9,7 +9,7 @@ export function BrokenStrip({
   document,
 }: {
   issues: readonly Issue[];
-  document: ModelDocument | null;
+  document: ModelDocument;
 }) {
   const { t } = useTranslation();
   const errors = issues.filter(({ severity }) => severity === 'error');

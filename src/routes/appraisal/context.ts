@@ -10,8 +10,8 @@ import type { Language } from '../../store/settings.ts';
 
 export interface AppraisalContext {
   readonly slug: string;
-  /** Null where what was opened is no sound document: `issues` say why. */
-  readonly document: ModelDocument | null;
+  /** The draft as it stands. */
+  readonly document: ModelDocument;
   /** What is wrong with the model, or was found on running it. */
   readonly issues: readonly Issue[];
   readonly result: Result | null;
@@ -22,6 +22,7 @@ export type Basis = 'base' | 'mean';
 
 /** There only while the model is whole. */
 export interface Result {
+  /** What the numbers are of: the draft, or for a moment what it was before the last edit. */
   readonly document: ModelDocument;
   readonly comparison: Comparison;
   /** What costs and health are taken from. */

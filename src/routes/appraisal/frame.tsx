@@ -7,37 +7,29 @@ import { Preferences } from '../../components/preferences.tsx';
 import { Rail, type RailStep } from '../../features/rail/rail.tsx';
 import { formatNumber } from '../../i18n/format.ts';
 import { useSettings } from '../../store/settings.ts';
+import { Notices } from './notices.tsx';
+import { useSession } from './session-context.ts';
+import { UndoButtons } from './undo-buttons.tsx';
+import { WorkState } from './work-state.tsx';
 
 interface FrameProps {
-  readonly document: ModelDocument | null;
-  /** Name of the file it came from; null for a worked example. */
-  readonly file: string | null;
   readonly strip: ReactNode;
   readonly children: ReactNode;
 }
 
-export function Frame({ document, file, strip, children }: FrameProps) {
+export function Frame({ strip, children }: FrameProps) {
   const { t } = useTranslation();
-  const { language } = useSettings();
+  const { document } = useSession();
   const drawer = useRef<HTMLDialogElement>(null);
-  const count = document?.parameters.length;
-  const steps: RailStep[] = [
-    { to: 'question', name: t('steps.question') },
-    {
-      to: 'evidence',
-      name: t('steps.evidence'),
-      ...(count === undefined ? {} : { fact: formatNumber(count, language) }),
-    },
-    { to: 'results', name: t('steps.results') },
-  ];
+  const steps = useSteps(document);
   const close = () => drawer.current?.close();
   return (
-    <div className="lg:grid lg:grid-cols-[220px_1fr]">
-      <aside className="sticky top-0 hidden h-dvh flex-col overflow-y-auto p-5 pr-0 lg:flex">
+    <div className="lg:grid lg:grid-cols-[220px_1fr] print:block">
+      <aside className="sticky top-0 hidden h-dvh flex-col overflow-y-auto p-5 pr-0 lg:flex print:hidden">
         <Brand />
         <div className="mt-5">
           <Rail steps={steps} />
-          <AllAppraisals />
+          <OtherPlaces />
         </div>
         <div className="mt-auto pt-6 pr-5">
           <Preferences stacked />
@@ -48,7 +40,7 @@ export function Frame({ document, file, strip, children }: FrameProps) {
         aria-label={t('rail.label')}
         className="m-0 h-dvh max-h-none w-72 max-w-[85vw] border-r border-rule bg-paper p-5 text-ink backdrop:bg-[rgb(0_0_0/0.5)]"
       >
-        <div className="flex h-full flex-col">
+        <div className="flex min-h-full flex-col">
           <div className="mb-5 flex items-center justify-between">
             <Brand />
             <button type="button" className="control" onClick={close}>
@@ -56,15 +48,15 @@ export function Frame({ document, file, strip, children }: FrameProps) {
             </button>
           </div>
           <Rail steps={steps} onGo={close} />
-          <AllAppraisals />
+          <OtherPlaces />
           <div className="mt-auto pt-6">
             <Preferences stacked />
           </div>
         </div>
       </dialog>
-      <div className="min-h-dvh min-w-0 border-rule lg:border-l">
-        <div className="mx-auto w-full max-w-[1280px] px-4 pb-12 sm:px-8">
-          <header className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b-2 border-ink py-2">
+      <div className="min-h-dvh min-w-0 border-rule lg:border-l print:border-0">
+        <div className="mx-auto w-full max-w-[1280px] px-4 pb-12 sm:px-8 print:max-w-none print:p-0">
+          <header className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b-2 border-ink py-2 print:hidden">
             <button
               type="button"
               className="control px-3 lg:hidden"
@@ -75,21 +67,19 @@ export function Frame({ document, file, strip, children }: FrameProps) {
               </svg>
               {t('rail.open')}
             </button>
-            <p className="font-bold">{document?.question.title ?? file}</p>
-            <p className="ml-auto flex min-h-11 items-center gap-2 text-sm text-mute">
-              <span
-                aria-hidden="true"
-                className={`size-2 rounded-full ${file === null ? 'bg-gain' : 'border-2 border-brass'}`}
-              />
-              {file === null ? t('state.example') : t('state.file', { file })}
-            </p>
+            <p className="min-w-0 font-bold break-words">{document.question.title}</p>
+            <div className="ml-auto flex flex-wrap items-center gap-x-3">
+              <WorkState />
+              <UndoButtons />
+            </div>
           </header>
-          {strip}
+          <Notices />
+          <div className="print:hidden">{strip}</div>
           <main id="main" tabIndex={-1} className="min-w-0 outline-none">
             {children}
           </main>
-          <footer className="mt-10 max-w-[70em] border-t border-rule pt-3 text-sm text-mute">
-            {document && <Provenance about={document.about} />}
+          <footer className="mt-10 max-w-[70em] border-t border-rule pt-3 text-sm text-mute print:hidden">
+            <Provenance about={document.about} />
             <p>{t('caution')}</p>
           </footer>
         </div>
@@ -98,12 +88,35 @@ export function Frame({ document, file, strip, children }: FrameProps) {
   );
 }
 
-function AllAppraisals() {
+/** In the order of the job. */
+function useSteps({ parameters }: ModelDocument): readonly RailStep[] {
   const { t } = useTranslation();
+  const { language } = useSettings();
+  return [
+    { to: 'question', name: t('steps.question') },
+    {
+      to: 'evidence',
+      name: t('steps.evidence'),
+      fact: formatNumber(parameters.length, language),
+    },
+    { to: 'results', name: t('steps.results') },
+    { to: 'uncertainty', name: t('steps.uncertainty') },
+    { to: 'history', name: t('steps.history') },
+  ];
+}
+
+function OtherPlaces() {
+  const { t } = useTranslation();
+  const style = 'flex min-h-11 items-center text-mute hover:text-ink';
   return (
-    <Link to="/" className="mt-4 inline-flex min-h-11 items-center text-mute hover:text-ink">
-      {t('rail.all')}
-    </Link>
+    <p className="mt-4">
+      <Link to="/" className={style}>
+        {t('rail.all')}
+      </Link>
+      <Link to="/settings" className={style}>
+        {t('shell.settings')}
+      </Link>
+    </p>
   );
 }
 

@@ -4,7 +4,7 @@ import { useNavigate } from 'react-router-dom';
 import type { ModelDocument } from '../../../shared/model/document.ts';
 import type { Issue } from '../../../shared/model/issue.ts';
 import { IssueList } from '../../components/issue-list.tsx';
-import { FILE_SLUG, openFile } from '../../store/opened-file.ts';
+import { beginFromText } from '../../store/begin.ts';
 
 type Reading =
   | { readonly status: 'idle' }
@@ -30,10 +30,7 @@ export function OpenFile() {
     read(event.dataTransfer.files[0]);
   };
   return (
-    <section aria-labelledby="open-title" className="mt-10">
-      <h2 id="open-title" className="border-b border-ink pb-1.5 text-lg">
-        {t('openFile.title')}
-      </h2>
+    <>
       {/* biome-ignore lint/a11y/noStaticElementInteractions: dropping is one way more; the button does the same */}
       <div
         onDragOver={(event) => {
@@ -44,7 +41,7 @@ export function OpenFile() {
         onDrop={drop}
         className={`mt-4 flex flex-wrap items-center gap-x-5 gap-y-3 rounded-md border border-dashed p-4 ${over ? 'border-brass bg-brass-soft' : 'border-rule-strong'}`}
       >
-        <button type="button" className="control-primary" onClick={() => picker.current?.click()}>
+        <button type="button" className="control" onClick={() => picker.current?.click()}>
           {t('openFile.choose')}
         </button>
         <p className="min-w-0 flex-1 basis-64 text-mute">{t('openFile.body')}</p>
@@ -61,7 +58,7 @@ export function OpenFile() {
         />
       </div>
       <Outcome reading={reading} />
-    </section>
+    </>
   );
 }
 
@@ -72,10 +69,9 @@ function useReading(): [Reading, (file: File | undefined) => void] {
     if (!file) return;
     setReading({ status: 'reading' });
     try {
-      const result = await openFile(file);
-      if (result.document) return await navigate(`/appraisals/${FILE_SLUG}/results`);
-      const { issues, draft } = result;
-      setReading({ status: 'refused', file: file.name, issues, draft });
+      const { address, issues, document } = await beginFromText(await file.text());
+      if (address !== null) return await navigate(`/appraisals/${address}/results`);
+      setReading({ status: 'refused', file: file.name, issues, draft: document });
     } catch {
       // A folder, or a file that was moved or taken away meanwhile.
       setReading({ status: 'unreadable', file: file.name });

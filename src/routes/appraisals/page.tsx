@@ -3,7 +3,8 @@ import { Link } from 'react-router-dom';
 import { usePageTitle } from '../../components/page-title.ts';
 import { type ExampleFacts, listExamples } from '../../store/examples.ts';
 import { PlainPage } from '../plain-page.tsx';
-import { OpenFile } from './open-file.tsx';
+import { Begin } from './begin.tsx';
+import { OwnAppraisals } from './own-appraisals.tsx';
 
 const EXAMPLES = listExamples();
 
@@ -14,6 +15,7 @@ export function Component() {
     <PlainPage>
       <h1 className="mt-8 text-3xl">{t('appraisals.title')}</h1>
       <p className="mt-2 max-w-[44em] text-lg text-mute">{t('appraisals.lead')}</p>
+      <OwnAppraisals />
       <section aria-labelledby="examples-title" className="mt-10">
         <h2 id="examples-title" className="border-b border-ink pb-1.5 text-lg">
           {t('appraisals.examples')}
@@ -28,7 +30,7 @@ export function Component() {
           </ul>
         )}
       </section>
-      <OpenFile />
+      <Begin />
       <footer className="mt-12 max-w-[70em] border-t border-rule pt-3 text-sm text-mute">
         <p>{t('caution')}</p>
       </footer>
