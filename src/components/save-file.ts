@@ -2,7 +2,11 @@
 
 export function saveFile(name: string, text: string, type: string): void {
   // The mark tells spreadsheets that the text is UTF-8.
-  const url = URL.createObjectURL(new Blob(['\uFEFF', text], { type: `${type};charset=utf-8` }));
+  saveBlob(name, new Blob(['\uFEFF', text], { type: `${type};charset=utf-8` }));
+}
+
+export function saveBlob(name: string, blob: Blob): void {
+  const url = URL.createObjectURL(blob);
   const link = document.createElement('a');
   link.href = url;
   link.download = name;
