@@ -173,6 +173,8 @@ export const issues = {
     unknownThreshold: 'There is no threshold {{id}}.',
   },
   run: {
+    brokeDown:
+      'The calculation broke down. Change something to try again; close other tabs where memory is short.',
     curveOutside:
       'A survival curve leaves 0 to 1: {{value}} in cycle {{cycle}}, strategy {{strategy}}, profile {{profile}} ({{count}} times, first in draw {{draw}}).',
     curvesCross:

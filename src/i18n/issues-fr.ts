@@ -186,6 +186,8 @@ export const issues = {
     unknownThreshold: 'Il n’y a pas de seuil {{id}}.',
   },
   run: {
+    brokeDown:
+      'Le calcul s’est interrompu. Modifiez quelque chose pour réessayer\u00A0; fermez d’autres onglets si la mémoire manque.',
     curveOutside:
       'Une courbe de survie sort de 0 à 1\u00A0: {{value}} au cycle {{cycle}}, stratégie {{strategy}}, profil {{profile}} ({{count}} fois, d’abord au tirage {{draw}}).',
     curvesCross:

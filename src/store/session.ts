@@ -138,12 +138,14 @@ export class Session {
     return this.alone(async () => {
       await this.drain(true);
       if (this.work.status === 'failed') throw new StoreError(this.work.code);
-      for (;;) {
-        const version = await this.addVersion(message).catch((problem) => {
-          throw new StoreError(storeCode(problem), problem);
-        });
-        if (version) return version;
-        await this.readOthers();
+      try {
+        for (;;) {
+          const version = await this.addVersion(message);
+          if (version) return version;
+          await this.readOthers();
+        }
+      } catch (problem) {
+        throw new StoreError(storeCode(problem), problem);
       }
     });
   }
