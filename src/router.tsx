@@ -19,6 +19,10 @@ export function createRouter() {
             { path: 'question', lazy: () => import('./routes/appraisal/question/page.tsx') },
             { path: 'evidence', lazy: () => import('./routes/appraisal/evidence/page.tsx') },
             { path: 'results', lazy: () => import('./routes/appraisal/results/page.tsx') },
+            {
+              path: 'uncertainty',
+              lazy: () => import('./routes/appraisal/uncertainty/page.tsx'),
+            },
             { path: '*', Component: NotFound },
           ],
         },
