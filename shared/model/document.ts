@@ -371,6 +371,27 @@ const analysis = z.looseObject({
   designs: z.array(design).max(100).default([]),
 });
 
+const sentenceKey = z
+  .string()
+  .regex(/^[A-Za-z0-9.]{1,100}$/)
+  .refine((value) => !HOSTILE_KEYS.has(value));
+
+/** Sentences of the one-page brief that a person wrote in place of the drafted ones. */
+const brief = z.looseObject({
+  /** By language of the page (ISO 639), then by the sentence's code. */
+  sentences: z.record(
+    z.string().regex(/^[a-z]{2,3}$/),
+    z.record(
+      sentenceKey,
+      z.looseObject({
+        text: z.string().min(1).max(2_000),
+        /** Digest of the document without its `brief` that it was written for. */
+        writtenFor: z.string().regex(/^[0-9a-f]{64}$/),
+      }),
+    ),
+  ),
+});
+
 export const documentSchema = z.looseObject({
   format: z.literal(FORMAT),
   formatVersion: z.literal(FORMAT_VERSION),
@@ -396,6 +417,7 @@ export const documentSchema = z.looseObject({
   payoffs: z.array(payoff).max(1_000),
   scenarios: z.array(scenario).max(200).default([]),
   analysis: analysis.prefault({}),
+  brief: brief.optional(),
 });
 
 export type ModelDocument = z.infer<typeof documentSchema>;
