@@ -1,3 +1,4 @@
+import { brief } from './brief-en.ts';
 import { charts } from './charts-en.ts';
 import { issues } from './issues-en.ts';
 import { modelling } from './modelling-en.ts';
@@ -294,6 +295,7 @@ export const en = {
   caution:
     'Steelyard supports deliberation by trained people; it gives no clinical advice. National guidelines, local rules and licensed practice come first. Have a model reviewed before a decision rests on it.',
   issues,
+  ...brief,
   ...modelling,
   charts,
   uncertainty,

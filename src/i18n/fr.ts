@@ -1,3 +1,4 @@
+import { brief } from './brief-fr.ts';
 import { charts } from './charts-fr.ts';
 import { issues } from './issues-fr.ts';
 import { modelling } from './modelling-fr.ts';
@@ -304,6 +305,7 @@ export const fr: Words = {
   caution:
     'Steelyard aide à la délibération de personnes formées\u00A0; il ne donne aucun avis clinique. Les recommandations nationales, les règles locales et la pratique autorisée passent d’abord. Faites relire un modèle avant qu’une décision ne s’y appuie.',
   issues,
+  ...brief,
   ...modelling,
   charts,
   uncertainty,
