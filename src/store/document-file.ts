@@ -14,7 +14,12 @@ export async function exportText(document: ModelDocument): Promise<string> {
 
 /** A file name that every system takes. */
 export function exportName(document: ModelDocument): string {
-  const plain = document.question.title.normalize('NFKD').replace(/\p{M}/gu, '').toLowerCase();
+  // A draft may be broken anywhere.
+  const title: unknown = document.question?.title;
+  const plain = String(title ?? '')
+    .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
+    .toLowerCase();
   const words = plain.replace(/[^a-z0-9]+/g, '-').replace(/^-+|-+$/g, '');
   return `${words.slice(0, 60).replace(/-+$/, '') || 'appraisal'}.json`;
 }

@@ -48,5 +48,6 @@ describe('a document as a file', () => {
       exportName({ ...tinyDocument(), question: { ...tinyDocument().question, title } });
     expect(named('Le dépistage: à quel prix?')).toBe('le-depistage-a-quel-prix.json');
     expect(named('???')).toBe('appraisal.json');
+    expect(exportName({ ...tinyDocument(), question: null as never })).toBe('appraisal.json');
   });
 });
