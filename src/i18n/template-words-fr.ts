@@ -4,8 +4,8 @@ import type { TemplateWords } from '../../shared/model/templates/template-words.
 export const templateWords: TemplateWords = {
   untitled: 'Évaluation sans titre',
   allPlaceholders:
-    'Issu d’un modèle type : chaque nombre est provisoire tant que vous ne l’avez pas remplacé, et aucun n’a de source.',
-  replaceMe: 'À remplacer : valeur provisoire, pas une donnée probante.',
+    'Issu d’un modèle type : chaque nombre est provisoire tant que vous ne l’avez pas remplacé, et aucun n’a de source.',
+  replaceMe: 'À remplacer : valeur provisoire, pas une donnée probante.',
   notYetGiven: 'Pas encore indiquée',
 
   threshold: 'Seuil',

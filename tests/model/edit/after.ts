@@ -38,3 +38,12 @@ export const DOCUMENTS: readonly [string, ModelDocument][] = [
   ['tiny', tinyDocument()],
   ...EXAMPLE_SLUGS.map((slug: ExampleSlug): [string, ModelDocument] => [slug, exampleOf(slug)]),
 ];
+
+/** The same numbers but for the order of sums: to a relative 1e-9. */
+export function expectNear(values: readonly number[], expected: readonly number[]): void {
+  expect(values).toHaveLength(expected.length);
+  for (const [index, value] of values.entries()) {
+    const off = Math.abs(value - expected[index]!);
+    expect(off).toBeLessThanOrEqual(1e-9 * Math.abs(expected[index]!));
+  }
+}
