@@ -1,5 +1,6 @@
 import { brief } from './brief-en.ts';
 import { charts } from './charts-en.ts';
+import { framing } from './framing-en.ts';
 import { issues } from './issues-en.ts';
 import { modelling } from './modelling-en.ts';
 import { shell } from './shell-en.ts';
@@ -300,4 +301,5 @@ export const en = {
   charts,
   uncertainty,
   ...shell,
+  framing,
 };

@@ -1,5 +1,6 @@
 import { brief } from './brief-fr.ts';
 import { charts } from './charts-fr.ts';
+import { framing } from './framing-fr.ts';
 import { issues } from './issues-fr.ts';
 import { modelling } from './modelling-fr.ts';
 import { shell } from './shell-fr.ts';
@@ -310,4 +311,5 @@ export const fr: Words = {
   charts,
   uncertainty,
   ...shell,
+  framing,
 };

@@ -10,7 +10,10 @@ const GROUPED = /^[+-]?\d{1,3}(,\d{3})+(\.\d*)?$/;
  * @returns null where the text is no finite number
  */
 export function parseNumber(text: string, language: Language): number | null {
-  const bare = text.trim().replaceAll('\u2212', '-').replaceAll(/[\s\u00A0\u202F]/g, '');
+  const bare = text
+    .trim()
+    .replaceAll('\u2212', '-')
+    .replaceAll(/[\s\u00A0\u202F]/g, '');
   const plain = language === 'fr' ? bare.replace(',', '.') : ungrouped(bare);
   if (!PLAIN.test(plain)) return null;
   const value = Number(plain);

@@ -1,6 +1,6 @@
 import { useTranslation } from 'react-i18next';
-import { fromPercent, numberText, parseNumber, toPercent } from '../../i18n/parse-number.ts';
 import { formatValue } from '../../i18n/format.ts';
+import { fromPercent, numberText, parseNumber, toPercent } from '../../i18n/parse-number.ts';
 import { useSettings } from '../../store/settings.ts';
 import { Field, INPUT } from './field.tsx';
 import { useDraft } from './use-draft.ts';

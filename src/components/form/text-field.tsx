@@ -22,7 +22,8 @@ interface TextFieldProps {
 
 export function TextField(props: TextFieldProps) {
   const { t } = useTranslation();
-  const { label, quiet, help, value, onValue, required, maxLength, check, lines, className } = props;
+  const { label, quiet, help, value, onValue, required, maxLength, check, lines, className } =
+    props;
   const problem = (text: string) => {
     if (required && text.trim() === '') return t('form.required');
     return text === '' ? null : (check?.(text) ?? null);

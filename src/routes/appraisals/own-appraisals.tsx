@@ -77,9 +77,7 @@ function StoreNotice({ code }: { code: StoreCode | null }) {
   const words = connection === 'open' ? code && t(code) : t(`connection.${connection}`);
   return (
     <div role="alert">
-      {words && (
-        <p className="mt-6 max-w-[44em] border-l-4 border-clay pl-4 text-clay">{words}</p>
-      )}
+      {words && <p className="mt-6 max-w-[44em] border-l-4 border-clay pl-4 text-clay">{words}</p>}
     </div>
   );
 }

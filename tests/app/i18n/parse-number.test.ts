@@ -26,9 +26,12 @@ it.each([
   expect(parseNumber(text, 'fr')).toBe(value);
 });
 
-it.each([0.035, 0.07, 1 / 3, 0.0123456789, 1, 0])('a share of %s survives as a percentage', (share) => {
-  expect(fromPercent(toPercent(share))).toBeCloseTo(share, 15);
-});
+it.each([0.035, 0.07, 1 / 3, 0.0123456789, 1, 0])(
+  'a share of %s survives as a percentage',
+  (share) => {
+    expect(fromPercent(toPercent(share))).toBeCloseTo(share, 15);
+  },
+);
 
 it('writes what it reads', () => {
   expect(numberText(toPercent(0.035), 'en')).toBe('3.5');
