@@ -27,7 +27,8 @@ export const brief = {
     },
     standing: {
       errors_one: 'The model has {{count}} error: mend it first, then the page can be printed.',
-      errors_other: 'The model has {{count}} errors: mend them first, then the page can be printed.',
+      errors_other:
+        'The model has {{count}} errors: mend them first, then the page can be printed.',
       noBase: 'The base case has not been worked out.',
       baseOfOther: 'The numbers are those of an earlier model.',
       noDraws: 'The draws are not done: how sure one can be is missing.',

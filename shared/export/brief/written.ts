@@ -1,6 +1,7 @@
 /** Sentences of the brief that a person wrote in place of the drafted ones. */
-import type { ModelDocument } from '../../model/document.ts';
+
 import { digestOf } from '../../model/digest.ts';
+import type { ModelDocument } from '../../model/document.ts';
 import type { Sentence } from './sentence.ts';
 
 export interface WrittenSentence {
