@@ -1,8 +1,10 @@
 import { brief } from './brief-en.ts';
 import { charts } from './charts-en.ts';
+import { explain } from './explain-en.ts';
 import { framing } from './framing-en.ts';
 import { issues } from './issues-en.ts';
 import { modelling } from './modelling-en.ts';
+import { more } from './more-results-en.ts';
 import { shell } from './shell-en.ts';
 import { uncertainty } from './uncertainty-en.ts';
 
@@ -299,6 +301,8 @@ export const en = {
   ...brief,
   ...modelling,
   charts,
+  explain,
+  more,
   uncertainty,
   ...shell,
   framing,

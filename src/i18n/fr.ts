@@ -1,8 +1,10 @@
 import { brief } from './brief-fr.ts';
 import { charts } from './charts-fr.ts';
+import { explain } from './explain-fr.ts';
 import { framing } from './framing-fr.ts';
 import { issues } from './issues-fr.ts';
 import { modelling } from './modelling-fr.ts';
+import { more } from './more-results-fr.ts';
 import { shell } from './shell-fr.ts';
 import { uncertainty } from './uncertainty-fr.ts';
 import type { Words } from './words.ts';
@@ -309,6 +311,8 @@ export const fr: Words = {
   ...brief,
   ...modelling,
   charts,
+  explain,
+  more,
   uncertainty,
   ...shell,
   framing,

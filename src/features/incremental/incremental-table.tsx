@@ -23,6 +23,8 @@ export interface IncrementalTableProps {
   readonly best: string;
   readonly symbol: string;
   readonly outcome: OutcomeWords;
+  /** Takes a number of the base case apart. */
+  readonly onExplain?: (strategy: string, measure: 'cost' | 'outcome') => void;
   readonly language: Language;
 }
 
@@ -144,23 +146,52 @@ function Name({ id, names }: { id: string; names: ReadonlyMap<string, string> })
 
 type CellProps = IncrementalTableProps & { readonly row: IncrementalRow };
 
-function Cost({ row, rows, errors, language }: CellProps) {
+function Cost(cell: CellProps) {
+  const { t } = useTranslation();
+  const { row, rows, errors, language } = cell;
   const decimals = columnDecimals(rows.map(({ cost }) => cost));
   return (
     <Figure name="cost" value={row.cost}>
-      {formatNumber(row.cost, language, { decimals })}
+      <Explained {...cell} measure="cost" term={t('table.cost')}>
+        {formatNumber(row.cost, language, { decimals })}
+      </Explained>
       <PlusMinus error={errors?.get(row.id)?.cost} decimals={decimals} language={language} />
     </Figure>
   );
 }
 
-function Outcome({ row, outcomes, errors, language }: CellProps) {
+function Outcome(cell: CellProps) {
+  const { row, outcomes, errors, outcome, language } = cell;
   const value = outcomes.get(row.id) ?? 0;
   return (
     <Figure name="outcome" value={value}>
-      {formatOutcome(value, language)}
+      <Explained {...cell} measure="outcome" term={outcome.plural}>
+        {formatOutcome(value, language)}
+      </Explained>
       <PlusMinus error={errors?.get(row.id)?.health} decimals={3} language={language} />
     </Figure>
+  );
+}
+
+type ExplainedProps = CellProps & {
+  readonly measure: 'cost' | 'outcome';
+  readonly term: string;
+  readonly children: string;
+};
+
+/** A number of the base case leads to what it is made of; a mean of draws does not. */
+function Explained({ row, names, errors, onExplain, measure, term, children }: ExplainedProps) {
+  const { t } = useTranslation();
+  if (!onExplain || errors) return children;
+  return (
+    <button
+      type="button"
+      title={t('explain.openNamed', { what: `${term}, ${names.get(row.id)}` })}
+      className="min-h-6 underline decoration-rule-strong decoration-dotted underline-offset-4 hover:decoration-current hover:decoration-solid"
+      onClick={() => onExplain(row.id, measure)}
+    >
+      {children}
+    </button>
   );
 }
 

@@ -6,10 +6,11 @@ import type { Draws } from '../../../shared/analysis/psa/draws.ts';
 import type { ModelDocument, Question } from '../../../shared/model/document.ts';
 import { hasErrors } from '../../../shared/model/issue.ts';
 import { AnswerStrip } from '../../features/answer-strip/answer-strip.tsx';
+import { ExplainProvider } from '../../features/explain/provider.tsx';
 import { formatMoney } from '../../i18n/format.ts';
 import { outcomeWords } from '../../i18n/outcome-words.ts';
 import { answerAt, type Comparison, compareMeans } from '../../store/answer.ts';
-import type { DrawsRun } from '../../store/draws.ts';
+import type { DrawsRun, DrawsState } from '../../store/draws.ts';
 import type { Answered, LiveState } from '../../store/live-answer.ts';
 import { type PoisePlace, usePoise } from '../../store/poise.ts';
 import { changeSettings, getSettings, useSettings } from '../../store/settings.ts';
@@ -25,95 +26,80 @@ interface WorkbenchProps {
   readonly live: LiveState & Pick<DrawsRun, 'run' | 'stop'>;
 }
 
+/** One tree whether the model is whole, broken or being worked out: whoever types stays there. */
 export function Workbench({ slug, live }: WorkbenchProps) {
   const { document, issues } = useSession();
   const { language } = useSettings();
   const { question } = document;
   const [place, move] = usePoise(getSettings().thresholds[slug] ?? thresholdInForce(question));
-  const [basis, setBasis] = useState<Basis>('base');
   useKeptThreshold(slug, place);
   useThresholdInForce(question, move);
-  const common = { slug, document, issues, language };
-  if (live.now) {
-    const weighing = { place, move, basis, setBasis };
-    return <Whole {...common} {...weighing} live={live} now={live.now} />;
-  }
-  const strip = hasErrors(issues) ? (
-    <BrokenStrip issues={issues} document={document} />
-  ) : (
-    <WaitingStrip />
-  );
+  const result = useResult(live, place.now, move);
+  const context: AppraisalContext = { slug, document, issues, language, result };
   return (
-    <Frame strip={strip}>
-      <Outlet context={{ ...common, result: null } satisfies AppraisalContext} />
+    <Frame strip={<Strip live={live} result={result} place={place} />}>
+      <Outlet context={context} />
     </Frame>
   );
 }
 
-interface WholeProps
-  extends Omit<AppraisalContext, 'result'>,
-    Pick<Result, 'move' | 'basis' | 'setBasis'> {
-  readonly live: WorkbenchProps['live'];
-  readonly now: Answered;
-  readonly place: PoisePlace;
-}
-
-function Whole(props: WholeProps) {
+function useResult(live: WorkbenchProps['live'], at: number, move: Result['move']): Result | null {
   const { t } = useTranslation();
-  const { slug, issues, language, live, now: answered, place, move, basis, setBasis } = props;
-  const { document } = answered;
-  const { question } = document;
-  const { draws: state } = answered;
-  const { run: start, stop } = live;
+  const { language } = useSettings();
+  const [basis, setBasis] = useState<Basis>('base');
+  const { now: answered, run: start, stop } = live;
+  const document = answered?.document ?? null;
+  const state = answered?.draws ?? NO_DRAWS;
   const run = useMemo<DrawsRun>(() => ({ state, run: start, stop }), [state, start, stop]);
   const comparison = useComparison(basis, answered);
-  const now = useMemo(
-    () => answerAt(document, comparison, drawsOf(answered), place.now),
-    [document, comparison, answered, place.now],
-  );
-  const earlier = useEarlier(answered, live.was, place);
-  const before = useComparison(basis, earlier?.answered ?? answered);
-  const then = earlier?.answered ?? null;
-  const threshold = earlier?.threshold ?? 0;
-  const was = useMemo(
-    () => then && answerAt(then.document, before, drawsOf(then), threshold),
-    [then, before, threshold],
-  );
-  const names = useMemo(() => namesOf(document), [document]);
+  const now = useAnswer(answered, comparison, at);
+  const names = useMemo(() => document && namesOf(document), [document]);
+  if (!document || !comparison || !now || !names) return null;
+  const { question } = document;
   const outcome = outcomeWords(question, t);
   const { symbol } = question.currency;
   const thresholdWords = (threshold: number) =>
     t('threshold', { amount: formatMoney(threshold, symbol, language), unit: outcome.per });
-  const result: Result = {
-    document,
-    comparison,
-    basis,
-    setBasis,
-    now,
-    run,
-    move,
-    names,
-    outcome,
-    thresholdWords,
-  };
-  const strip = (
+  const words = { names, outcome, thresholdWords };
+  return { document, comparison, basis, setBasis, now, run, move, ...words };
+}
+
+interface StripProps {
+  readonly live: LiveState;
+  readonly result: Result | null;
+  readonly place: PoisePlace;
+}
+
+function Strip({ live, result, place }: StripProps) {
+  const { document, issues } = useSession();
+  if (live.now && result)
+    return <Answer live={live} now={live.now} result={result} place={place} />;
+  return hasErrors(issues) ? <BrokenStrip issues={issues} document={document} /> : <WaitingStrip />;
+}
+
+interface AnswerProps extends StripProps {
+  readonly result: Result;
+  readonly now: Answered;
+}
+
+function Answer({ live, now, result, place }: AnswerProps) {
+  const { language } = useSettings();
+  const { question } = result.document;
+  const earlier = useEarlier(now, live.was, place);
+  const then = earlier?.answered ?? null;
+  const was = useAnswer(then, useComparison(result.basis, then), earlier?.threshold ?? 0);
+  return (
     <AnswerStrip
-      now={now}
+      now={result.now}
       was={was}
-      names={then ? new Map([...namesOf(then.document), ...names]) : names}
+      names={then ? new Map([...namesOf(then.document), ...result.names]) : result.names}
       comparator={question.comparator}
-      threshold={thresholdWords(place.now)}
-      symbol={symbol}
+      threshold={result.thresholdWords(place.now)}
+      symbol={question.currency.symbol}
       beneficiaries={question.beneficiaries?.label}
-      run={run}
+      run={result.run}
       language={language}
     />
-  );
-  const context = { slug, document: props.document, issues, language, result };
-  return (
-    <Frame strip={strip}>
-      <Outlet context={context satisfies AppraisalContext} />
-    </Frame>
   );
 }
 
@@ -126,16 +112,27 @@ function WaitingStrip() {
   );
 }
 
-function drawsOf({ draws }: Answered): Draws | null {
-  return draws.status === 'done' ? draws.draws : null;
+const NO_DRAWS: DrawsState = { status: 'none' };
+
+function drawsOf(answered: Answered | null): Draws | null {
+  return answered?.draws.status === 'done' ? answered.draws.draws : null;
 }
 
-function useComparison(basis: Basis, answered: Answered): Comparison {
-  const { comparison } = answered;
+function useComparison(basis: Basis, answered: Answered | null): Comparison | null {
+  const base = answered?.comparison ?? null;
   const draws = drawsOf(answered);
   return useMemo(
-    () => (basis === 'mean' && draws ? compareMeans(draws) : comparison),
-    [basis, draws, comparison],
+    () => (basis === 'mean' && draws ? compareMeans(draws) : base),
+    [basis, draws, base],
+  );
+}
+
+function useAnswer(answered: Answered | null, comparison: Comparison | null, threshold: number) {
+  const document = answered?.document ?? null;
+  const draws = drawsOf(answered);
+  return useMemo(
+    () => document && comparison && answerAt(document, comparison, draws, threshold),
+    [document, comparison, draws, threshold],
   );
 }
 

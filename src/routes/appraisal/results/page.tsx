@@ -6,11 +6,13 @@ import { frontierRows } from '../../../../shared/analysis/incremental.ts';
 import { IssueList } from '../../../components/issue-list.tsx';
 import { usePageTitle } from '../../../components/page-title.ts';
 import { Steady } from '../../../components/steady.tsx';
+import { useExplain } from '../../../features/explain/use-explain.ts';
 import { Frontier } from '../../../features/frontier/frontier.tsx';
 import { IncrementalTable } from '../../../features/incremental/incremental-table.tsx';
 import { type AppraisalContext, type Result, useAppraisalContext } from '../context.ts';
 import { basisWords } from './basis.tsx';
 import { findingWords } from './finding-words.ts';
+import { More } from './more/more.tsx';
 import { Weighing } from './weighing.tsx';
 
 const HEADING = 'text-2xl leading-tight font-bold text-balance sm:text-[1.65rem]';
@@ -52,6 +54,7 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
     [comparison],
   );
   const points = useMemo(() => frontierPoints({ document, comparison }), [document, comparison]);
+  const explain = useExplain();
   const outcomes = new Map(points.map(({ id, outcome: value }) => [id, value]));
   return (
     <>
@@ -75,6 +78,7 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
             best={now.best}
             symbol={symbol}
             outcome={outcome}
+            onExplain={(strategy, measure) => explain?.({ what: 'total', strategy, measure })}
             language={language}
           />
           <p className="mt-2 text-sm text-mute">
@@ -94,6 +98,13 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
         />
       </div>
       <Notes result={result} issues={issues} />
+      <More
+        result={result}
+        slug={slug}
+        onOccupancy={(strategy, state, cycle) =>
+          explain?.({ what: 'occupancy', strategy, state, cycle })
+        }
+      />
     </>
   );
 }
