@@ -5,7 +5,7 @@ import type { Group, ModelDocument } from '../../../shared/model/document.ts';
 import { itemsOf, type Target, type What } from '../../../shared/model/edit/target.ts';
 import { exampleOf } from '../../examples/load.ts';
 import { tinyDocument } from '../../fixtures/tiny-document.ts';
-import { after, DOCUMENTS, soundAfter } from '../../model/edit/after.ts';
+import { applied, DOCUMENTS, soundAfter } from '../../model/edit/after.ts';
 
 const KINDS: readonly What[] = [
   'strategy',
@@ -198,5 +198,5 @@ describe('who parts from a group keeps its uncertainty', () => {
 });
 
 function soundGroups(document: ModelDocument, edits: Parameters<typeof soundAfter>[1]) {
-  return after(document, edits).groups;
+  return applied(document, edits).groups;
 }

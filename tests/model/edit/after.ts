@@ -11,7 +11,7 @@ import { exampleOf } from '../../examples/load.ts';
 import { tinyDocument } from '../../fixtures/tiny-document.ts';
 
 /** Applied; that the inverse restores the first digest is asserted on the way. */
-export function after(document: ModelDocument, edits: readonly Edit[]): ModelDocument {
+export function applied(document: ModelDocument, edits: readonly Edit[]): ModelDocument {
   const { document: changed, inverse } = applyEdits(document, edits);
   expect(digestOf(applyEdits(changed, inverse).document)).toBe(digestOf(document));
   return changed;
@@ -28,7 +28,7 @@ export function errorsOf(document: ModelDocument): string[] {
 
 /** Applied, and sound. */
 export function soundAfter(document: ModelDocument, edits: readonly Edit[]): ModelDocument {
-  const changed = after(document, edits);
+  const changed = applied(document, edits);
   expect(errorsOf(changed)).toEqual([]);
   return changed;
 }

@@ -3,7 +3,7 @@ import { prepare } from '../../../shared/engine/engine.ts';
 import type { ModelDocument, Row } from '../../../shared/model/document.ts';
 import { changeBasis, setRest } from '../../../shared/model/edit/row-rest.ts';
 import { tinyDocument } from '../../fixtures/tiny-document.ts';
-import { after, DOCUMENTS, expectNear, soundAfter } from './after.ts';
+import { applied, DOCUMENTS, expectNear, soundAfter } from './after.ts';
 
 const rowsIn = ({ movements }: ModelDocument) => (movements.type === 'rows' ? movements.rows : []);
 const totals = (each: ModelDocument) =>
@@ -44,20 +44,20 @@ describe('the tiny row', () => {
 
   test('goes from one basis to another with its formulas', () => {
     const rates = changeBasis(tiny, 'from_alive', 'rates');
-    const row = applied(tiny, rates);
+    const row = rowIn(tiny, rates);
     expect(row).toMatchObject({
       basis: 'rates',
       method: 'generator',
       cells: [{ formula: 'die_now' }],
     });
     expect(Object.hasOwn(row, 'remainder')).toBe(false);
-    expect(applied(tiny, changeBasis(tiny, 'from_alive', 'logit'))).toMatchObject({
+    expect(rowIn(tiny, changeBasis(tiny, 'from_alive', 'logit'))).toMatchObject({
       reference: 'alive',
     });
     expect(changeBasis(tiny, 'from_alive', 'probabilities')).toEqual([]);
   });
 });
 
-function applied(document: ModelDocument, edits: Parameters<typeof soundAfter>[1]): Row {
-  return rowsIn(after(document, edits))[0]!;
+function rowIn(document: ModelDocument, edits: Parameters<typeof soundAfter>[1]): Row {
+  return rowsIn(applied(document, edits))[0]!;
 }
