@@ -1,6 +1,6 @@
 import { useTranslation } from 'react-i18next';
-import { useSession } from './session-context.ts';
 import { exportDocument } from './export-document.ts';
+import { useSession } from './session-context.ts';
 
 /** Where the work is, in words and by a mark; what to do where it is not safe. */
 export function WorkState() {
@@ -16,7 +16,8 @@ export function WorkState() {
       </span>
     );
   }
-  if (work.status === 'saving') return <Said mark="border-2 border-brass">{t('shell.saving')}</Said>;
+  if (work.status === 'saving')
+    return <Said mark="border-2 border-brass">{t('shell.saving')}</Said>;
   if (!appraisal) return <Said mark="border-2 border-mute">{t('shell.example')}</Said>;
   return <Said mark="bg-gain">{t('shell.saved')}</Said>;
 }
@@ -32,11 +33,7 @@ function Said({ mark, children }: { mark: string; children: string }) {
 
 function Act({ name, act }: { name: string; act: () => void }) {
   return (
-    <button
-      type="button"
-      className="min-h-11 text-ink underline underline-offset-4"
-      onClick={act}
-    >
+    <button type="button" className="min-h-11 text-ink underline underline-offset-4" onClick={act}>
       {name}
     </button>
   );

@@ -37,9 +37,11 @@ export function Workbench({ slug, live }: WorkbenchProps) {
   const result = useResult(live, place.now, move);
   const context: AppraisalContext = { slug, document, issues, language, result };
   return (
-    <Frame strip={<Strip live={live} result={result} place={place} />}>
-      <Outlet context={context} />
-    </Frame>
+    <ExplainProvider document={result?.document ?? document}>
+      <Frame strip={<Strip live={live} result={result} place={place} />}>
+        <Outlet context={context} />
+      </Frame>
+    </ExplainProvider>
   );
 }
 
