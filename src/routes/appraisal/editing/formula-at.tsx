@@ -6,6 +6,7 @@ import type { Path } from '../../../../shared/model/issue.ts';
 import { formulaFor } from '../../../../shared/model/strategy-formula.ts';
 import { FormulaField } from '../../../features/formula-field/formula-field.tsx';
 import { useEditing } from './context.tsx';
+import { IssueLines } from './issue-lines.tsx';
 
 interface TextAtProps {
   readonly label: string;
@@ -47,7 +48,7 @@ interface FormulaAtProps {
 /** One formula for all strategies, or one each; the writer says which. */
 export function FormulaAt(props: FormulaAtProps) {
   const { label, quiet, formula, at, path, what, strategies } = props;
-  const { document } = useEditing();
+  const { document, issuesAt } = useEditing();
   const held = document.strategies.filter(({ id }) => strategies?.includes(id) ?? true);
   const canDiffer = held.length > 1;
   if (typeof formula === 'string') {
@@ -86,6 +87,7 @@ export function FormulaAt(props: FormulaAtProps) {
           what={what}
         />
       )}
+      <IssueLines issues={issuesAt(path).filter((issue) => issue.path.length === path.length)} />
       <Differs {...props} ids={held.map(({ id }) => id)} />
     </fieldset>
   );
