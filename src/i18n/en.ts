@@ -2,7 +2,9 @@ import { brief } from './brief-en.ts';
 import { charts } from './charts-en.ts';
 import { explain } from './explain-en.ts';
 import { framing } from './framing-en.ts';
+import { history } from './history-en.ts';
 import { issues } from './issues-en.ts';
+import { levers } from './levers-en.ts';
 import { modelling } from './modelling-en.ts';
 import { more } from './more-results-en.ts';
 import { shell } from './shell-en.ts';
@@ -60,6 +62,7 @@ export const en = {
   steps: {
     question: 'Question',
     evidence: 'Evidence',
+    model: 'Model',
     results: 'Results',
     uncertainty: 'Uncertainty',
     history: 'History',
@@ -302,8 +305,10 @@ export const en = {
   ...modelling,
   charts,
   explain,
+  levers,
   more,
   uncertainty,
   ...shell,
   framing,
+  history,
 };

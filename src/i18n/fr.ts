@@ -2,7 +2,9 @@ import { brief } from './brief-fr.ts';
 import { charts } from './charts-fr.ts';
 import { explain } from './explain-fr.ts';
 import { framing } from './framing-fr.ts';
+import { history } from './history-fr.ts';
 import { issues } from './issues-fr.ts';
+import { levers } from './levers-fr.ts';
 import { modelling } from './modelling-fr.ts';
 import { more } from './more-results-fr.ts';
 import { shell } from './shell-fr.ts';
@@ -66,6 +68,7 @@ export const fr: Words = {
   steps: {
     question: 'Question',
     evidence: 'Données',
+    model: 'Modèle',
     results: 'Résultats',
     uncertainty: 'Incertitude',
     history: 'Historique',
@@ -312,8 +315,10 @@ export const fr: Words = {
   ...modelling,
   charts,
   explain,
+  levers,
   more,
   uncertainty,
   ...shell,
   framing,
+  history,
 };

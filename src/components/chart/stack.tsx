@@ -1,6 +1,6 @@
 /** Shares that sum to one whole, stacked over time. */
 import { useId } from 'react';
-import { Area, AreaChart, XAxis, YAxis } from 'recharts';
+import { Area, AreaChart, XAxis, YAxis, ZIndexLayer } from 'recharts';
 import { textWidth } from '../text-width.ts';
 import { useWidth } from '../use-width.ts';
 import { Hatches, hatchFill } from './hatches.tsx';
@@ -25,6 +25,8 @@ export interface StackProps {
 const PLOT = 240;
 const RIGHT = 16;
 const LOW = 17;
+/** Above all that the library draws. */
+const ABOVE = 3_000;
 
 export function Stack({ x, layers, writeX, writeY, ...props }: StackProps) {
   const [box, width] = useWidth<HTMLDivElement>(560);
@@ -96,23 +98,25 @@ export function Stack({ x, layers, writeX, writeY, ...props }: StackProps) {
         <text x={width - 2} y={TOP + PLOT + BOTTOM - 4} fontSize={TEXT} textAnchor="end">
           {props.xTitle}
         </text>
-        {places.map(
-          (place, index) =>
-            place && (
-              <text
-                key={layers[index]?.id}
-                x={left + place.x}
-                y={TOP + place.y + 5}
-                fontSize={TEXT}
-                textAnchor="middle"
-                stroke="var(--paper)"
-                strokeWidth="4"
-                paintOrder="stroke"
-              >
-                {layers[index]?.name}
-              </text>
-            ),
-        )}
+        <ZIndexLayer zIndex={ABOVE}>
+          {places.map(
+            (place, index) =>
+              place && (
+                <text
+                  key={layers[index]?.id}
+                  x={left + place.x}
+                  y={TOP + place.y + 5}
+                  fontSize={TEXT}
+                  textAnchor="middle"
+                  stroke="var(--paper)"
+                  strokeWidth="4"
+                  paintOrder="stroke"
+                >
+                  {layers[index]?.name}
+                </text>
+              ),
+          )}
+        </ZIndexLayer>
         <FillKey places={key.places} top={TOP + PLOT + BOTTOM} />
       </AreaChart>
     </div>

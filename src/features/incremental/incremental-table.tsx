@@ -9,6 +9,14 @@ import type { OutcomeWords } from '../../i18n/outcome-words.ts';
 import type { Errors } from '../../store/answer.ts';
 import type { Language } from '../../store/settings.ts';
 
+/** A strategy's numbers before the last change. */
+export interface FormerRow {
+  readonly cost: number;
+  readonly outcome: number;
+  readonly icer: number | null;
+  readonly nmb: number | null;
+}
+
 export interface IncrementalTableProps {
   /** In order of cost. */
   readonly rows: readonly IncrementalRow[];
@@ -20,6 +28,8 @@ export interface IncrementalTableProps {
   readonly nmb: ReadonlyMap<string, number>;
   /** Strategies' names by id, in document order. */
   readonly names: ReadonlyMap<string, string>;
+  /** Before the last change, by strategy; absent or null where nothing has changed. */
+  readonly was?: ReadonlyMap<string, FormerRow> | null;
   readonly best: string;
   readonly symbol: string;
   readonly outcome: OutcomeWords;
@@ -148,7 +158,7 @@ type CellProps = IncrementalTableProps & { readonly row: IncrementalRow };
 
 function Cost(cell: CellProps) {
   const { t } = useTranslation();
-  const { row, rows, errors, language } = cell;
+  const { row, rows, errors, was, language } = cell;
   const decimals = columnDecimals(rows.map(({ cost }) => cost));
   return (
     <Figure name="cost" value={row.cost}>
@@ -156,12 +166,17 @@ function Cost(cell: CellProps) {
         {formatNumber(row.cost, language, { decimals })}
       </Explained>
       <PlusMinus error={errors?.get(row.id)?.cost} decimals={decimals} language={language} />
+      <Was
+        now={row.cost}
+        before={was?.get(row.id)?.cost}
+        write={(value) => formatNumber(value, language, { decimals })}
+      />
     </Figure>
   );
 }
 
 function Outcome(cell: CellProps) {
-  const { row, outcomes, errors, outcome, language } = cell;
+  const { row, outcomes, errors, outcome, was, language } = cell;
   const value = outcomes.get(row.id) ?? 0;
   return (
     <Figure name="outcome" value={value}>
@@ -169,6 +184,11 @@ function Outcome(cell: CellProps) {
         {formatOutcome(value, language)}
       </Explained>
       <PlusMinus error={errors?.get(row.id)?.health} decimals={3} language={language} />
+      <Was
+        now={value}
+        before={was?.get(row.id)?.outcome}
+        write={(before) => formatOutcome(before, language)}
+      />
     </Figure>
   );
 }
@@ -213,12 +233,17 @@ function PlusMinus({ error, decimals, language }: PlusMinusProps) {
 }
 
 /** A ratio where there is one; otherwise the word for why there is none. */
-function Icer({ row, names, language }: CellProps) {
+function Icer({ row, names, was, language }: CellProps) {
   const { t } = useTranslation();
   if (row.icer !== null) {
     return (
       <Figure name="icer" value={row.icer}>
         {formatAmount(row.icer, language)}
+        <Was
+          now={row.icer}
+          before={was?.get(row.id)?.icer}
+          write={(before) => formatAmount(before, language)}
+        />
       </Figure>
     );
   }
@@ -230,13 +255,35 @@ function Icer({ row, names, language }: CellProps) {
   );
 }
 
-function NetBenefit({ row, nmb, language }: CellProps) {
+function NetBenefit({ row, nmb, was, language }: CellProps) {
   const value = nmb.get(row.id) ?? 0;
   const decimals = columnDecimals([...nmb.values()]);
   return (
     <Figure name="nmb" value={value}>
       {formatNumber(value, language, { decimals })}
+      <Was
+        now={value}
+        before={was?.get(row.id)?.nmb}
+        write={(before) => formatNumber(before, language, { decimals })}
+      />
     </Figure>
+  );
+}
+
+interface WasProps {
+  readonly now: number;
+  readonly before: number | null | undefined;
+  readonly write: (value: number) => string;
+}
+
+/** What it was, where that reads otherwise than what it is. */
+function Was({ now, before, write }: WasProps) {
+  const { t } = useTranslation();
+  if (before === null || before === undefined || write(before) === write(now)) return null;
+  return (
+    <span className="block text-sm font-normal text-brass">
+      {t('strip.was', { before: write(before) })}
+    </span>
   );
 }
 

@@ -6,6 +6,7 @@ import type { Move } from '../../components/move.ts';
 import type { OutcomeWords } from '../../i18n/outcome-words.ts';
 import type { Answer, Comparison } from '../../store/answer.ts';
 import type { DrawsRun } from '../../store/draws.ts';
+import type { Levers } from '../../store/levers.ts';
 import type { Language } from '../../store/settings.ts';
 
 export interface AppraisalContext {
@@ -15,6 +16,8 @@ export interface AppraisalContext {
   /** What is wrong with the model, or was found on running it. */
   readonly issues: readonly Issue[];
   readonly result: Result | null;
+  /** What-ifs in force: `result` is then of the model with them, not of the draft. */
+  readonly levers: Levers;
   readonly language: Language;
 }
 
@@ -29,6 +32,8 @@ export interface Result {
   readonly basis: Basis;
   readonly setBasis: (basis: Basis) => void;
   readonly now: Answer;
+  /** Before the last change of the model or its levers; null where nothing has changed. */
+  readonly was: { readonly comparison: Comparison; readonly answer: Answer } | null;
   readonly run: DrawsRun;
   readonly move: (move: Move) => void;
   /** Strategies' names by id, in document order. */

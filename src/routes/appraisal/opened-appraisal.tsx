@@ -1,6 +1,9 @@
-import { useEffect, useMemo } from 'react';
+import { useEffect, useMemo, useState } from 'react';
+import { useTranslation } from 'react-i18next';
 import { useLocation, useNavigate } from 'react-router-dom';
+import type { ModelDocument } from '../../../shared/model/document.ts';
 import { useConnection } from '../../store/connection.ts';
+import { type Levers, type Override, withLevers } from '../../store/levers.ts';
 import { useLiveAnswer } from '../../store/live-answer.ts';
 import { type Session, type SessionState, useSessionState } from '../../store/session.ts';
 import { type OpenedSession, SessionContext } from './session-context.ts';
@@ -15,7 +18,11 @@ interface OpenedAppraisalProps {
 
 export function OpenedAppraisal({ session, address }: OpenedAppraisalProps) {
   const state = useSessionState(session);
-  const live = useLiveAnswer(state.document, state.step);
+  const levers = useLevers();
+  const document = useLevered(state.document, levers);
+  // All moves of levers are one step after the model's own: "was" is the model as it is.
+  const step = document === state.document ? state.step : state.step + 0.5;
+  const live = useLiveAnswer(document, step);
   const { issues } = live;
   const readOnly = useReadOnly(state);
   useOwnAddress(address, state.appraisal?.id);
@@ -36,9 +43,21 @@ export function OpenedAppraisal({ session, address }: OpenedAppraisalProps) {
   );
   return (
     <SessionContext value={opened}>
-      <Workbench slug={state.appraisal?.id ?? address} live={live} />
+      <Workbench slug={state.appraisal?.id ?? address} live={live} levers={levers} />
     </SessionContext>
   );
+}
+
+function useLevers(): Levers {
+  const [overrides, set] = useState<readonly Override[]>([]);
+  return useMemo(() => ({ overrides, set }), [overrides]);
+}
+
+/** The draft with the levers in force; the draft itself where there are none. */
+function useLevered(document: ModelDocument, { overrides }: Levers): ModelDocument {
+  const { t } = useTranslation();
+  const reason = t('levers.reason');
+  return useMemo(() => withLevers(document, overrides, reason), [document, overrides, reason]);
 }
 
 function useReadOnly({ work }: SessionState): boolean {

@@ -5,12 +5,14 @@ import { Outlet } from 'react-router-dom';
 import type { Draws } from '../../../shared/analysis/psa/draws.ts';
 import type { ModelDocument, Question } from '../../../shared/model/document.ts';
 import { hasErrors } from '../../../shared/model/issue.ts';
+import { thresholdInForce } from '../../../shared/model/threshold.ts';
 import { AnswerStrip } from '../../features/answer-strip/answer-strip.tsx';
 import { ExplainProvider } from '../../features/explain/provider.tsx';
 import { formatMoney } from '../../i18n/format.ts';
 import { outcomeWords } from '../../i18n/outcome-words.ts';
 import { answerAt, type Comparison, compareMeans } from '../../store/answer.ts';
 import type { DrawsRun, DrawsState } from '../../store/draws.ts';
+import type { Levers } from '../../store/levers.ts';
 import type { Answered, LiveState } from '../../store/live-answer.ts';
 import { type PoisePlace, usePoise } from '../../store/poise.ts';
 import { changeSettings, getSettings, useSettings } from '../../store/settings.ts';
@@ -24,10 +26,11 @@ interface WorkbenchProps {
   /** Address of the appraisal, or of the example. */
   readonly slug: string;
   readonly live: LiveState & Pick<DrawsRun, 'run' | 'stop'>;
+  readonly levers: Levers;
 }
 
 /** One tree whether the model is whole, broken or being worked out: whoever types stays there. */
-export function Workbench({ slug, live }: WorkbenchProps) {
+export function Workbench({ slug, live, levers }: WorkbenchProps) {
   const { document, issues } = useSession();
   const { language } = useSettings();
   const { question } = document;
@@ -35,10 +38,17 @@ export function Workbench({ slug, live }: WorkbenchProps) {
   useKeptThreshold(slug, place);
   useThresholdInForce(question, move);
   const result = useResult(live, place.now, move);
-  const context: AppraisalContext = { slug, document, issues, language, result };
+  const context: AppraisalContext = { slug, document, issues, levers, language, result };
   return (
     <ExplainProvider document={result?.document ?? document}>
-      <Frame strip={<Strip live={live} result={result} place={place} />}>
+      <Frame
+        strip={
+          <>
+            <LeversNotice levers={levers} />
+            <Strip live={live} result={result} place={place} />
+          </>
+        }
+      >
         <Outlet context={context} />
       </Frame>
     </ExplainProvider>
@@ -49,12 +59,14 @@ function useResult(live: WorkbenchProps['live'], at: number, move: Result['move'
   const { t } = useTranslation();
   const { language } = useSettings();
   const [basis, setBasis] = useState<Basis>('base');
-  const { now: answered, run: start, stop } = live;
+  const { now: answered, was: before, run: start, stop } = live;
   const document = answered?.document ?? null;
   const state = answered?.draws ?? NO_DRAWS;
   const run = useMemo<DrawsRun>(() => ({ state, run: start, stop }), [state, start, stop]);
   const comparison = useComparison(basis, answered);
   const now = useAnswer(answered, comparison, at);
+  const former = useComparison(basis, before);
+  const then = useAnswer(before, former, at);
   const names = useMemo(() => document && namesOf(document), [document]);
   if (!document || !comparison || !now || !names) return null;
   const { question } = document;
@@ -63,7 +75,8 @@ function useResult(live: WorkbenchProps['live'], at: number, move: Result['move'
   const thresholdWords = (threshold: number) =>
     t('threshold', { amount: formatMoney(threshold, symbol, language), unit: outcome.per });
   const words = { names, outcome, thresholdWords };
-  return { document, comparison, basis, setBasis, now, run, move, ...words };
+  const was = former && then && { comparison: former, answer: then };
+  return { document, comparison, basis, setBasis, now, was, run, move, ...words };
 }
 
 interface StripProps {
@@ -105,6 +118,25 @@ function Answer({ live, now, result, place }: AnswerProps) {
   );
 }
 
+/** On every step: numbers that are not the model's own must not be taken for them. */
+function LeversNotice({ levers }: { levers: Levers }) {
+  const { t } = useTranslation();
+  const count = levers.overrides.length;
+  if (count === 0) return null;
+  return (
+    <p className="flex flex-wrap items-center gap-x-4 bg-brass-soft px-3">
+      {t('levers.inForce', { count })}
+      <button
+        type="button"
+        className="min-h-11 underline underline-offset-4"
+        onClick={() => levers.set([])}
+      >
+        {t('levers.drop')}
+      </button>
+    </p>
+  );
+}
+
 function WaitingStrip() {
   const { t } = useTranslation();
   return (
@@ -141,11 +173,6 @@ function useAnswer(answered: Answered | null, comparison: Comparison | null, thr
 /** Strategies' names by id. */
 function namesOf({ strategies }: ModelDocument): Map<string, string> {
   return new Map(strategies.map(({ id, label }) => [id, label]));
-}
-
-/** The one that the question names, or the first. */
-function thresholdInForce({ thresholds, thresholdInForce: chosen }: Question): number {
-  return (thresholds.find(({ id }) => id === chosen) ?? thresholds[0])?.value ?? 0;
 }
 
 /** The poise goes to the threshold in force when the question changes it. */

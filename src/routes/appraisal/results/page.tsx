@@ -3,13 +3,19 @@ import { useTranslation } from 'react-i18next';
 import { toHealth } from '../../../../shared/analysis/direction.ts';
 import { frontierSegments } from '../../../../shared/analysis/frontier-segments.ts';
 import { frontierRows } from '../../../../shared/analysis/incremental.ts';
+import { addScenario } from '../../../../shared/model/edit/add-scenario.ts';
 import { IssueList } from '../../../components/issue-list.tsx';
 import { usePageTitle } from '../../../components/page-title.ts';
 import { Steady } from '../../../components/steady.tsx';
 import { useExplain } from '../../../features/explain/use-explain.ts';
 import { Frontier } from '../../../features/frontier/frontier.tsx';
-import { IncrementalTable } from '../../../features/incremental/incremental-table.tsx';
+import {
+  type FormerRow,
+  IncrementalTable,
+} from '../../../features/incremental/incremental-table.tsx';
+import { Levers } from '../../../features/levers/levers.tsx';
 import { type AppraisalContext, type Result, useAppraisalContext } from '../context.ts';
+import { useSession } from '../session-context.ts';
 import { basisWords } from './basis.tsx';
 import { findingWords } from './finding-words.ts';
 import { More } from './more/more.tsx';
@@ -29,8 +35,9 @@ export function Component() {
 }
 
 /** Nothing to show yet, or nothing that may be shown: the strip says which. */
-function NoResults({ issues, document }: AppraisalContext) {
+function NoResults(context: AppraisalContext) {
   const { t } = useTranslation();
+  const { issues, document, levers } = context;
   const errors = issues.filter(({ severity }) => severity === 'error');
   if (errors.length === 0) return <h1 className="mt-7 text-2xl">{t('steps.results')}</h1>;
   return (
@@ -38,12 +45,26 @@ function NoResults({ issues, document }: AppraisalContext) {
       <h1 className="mt-7 text-2xl">{t('broken.title')}</h1>
       <p className="mt-1 mb-4 max-w-prose text-mute">{t('broken.body')}</p>
       <IssueList issues={errors} document={document} />
+      {levers.overrides.length > 0 && <WhatIf {...context} />}
     </>
   );
 }
 
-function Results({ slug, result, issues, language }: AppraisalContext & { result: Result }) {
+/** What-ifs on the draft; kept ones become scenarios of it. */
+function WhatIf({ document, levers, language }: AppraisalContext) {
   const { t } = useTranslation();
+  const { edit, readOnly } = useSession();
+  const keep = (label: string) =>
+    edit(
+      addScenario(document, { label, overrides: levers.overrides }).edits,
+      t('levers.keepLabel', { label }),
+    );
+  return <Levers {...{ document, levers, language }} onKeep={readOnly ? null : keep} />;
+}
+
+function Results(context: AppraisalContext & { result: Result }) {
+  const { t } = useTranslation();
+  const { slug, result, issues, language } = context;
   const { document, comparison, now, names, outcome, thresholdWords } = result;
   const { symbol } = document.question.currency;
   const { direction } = document.question.outcome;
@@ -64,6 +85,7 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
         </Steady>
       </div>
       <Weighing result={result} language={language} />
+      <WhatIf {...context} />
       <div className="mt-9 grid gap-10 min-[1120px]:grid-cols-[1.25fr_1fr]">
         <section aria-labelledby="incremental-title" className="min-w-0">
           <h2 id="incremental-title" className="mb-2.5 text-lg">
@@ -75,6 +97,7 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
             nmb={now.nmb}
             errors={comparison.errors}
             names={names}
+            was={formerOf(result)}
             best={now.best}
             symbol={symbol}
             outcome={outcome}
@@ -106,6 +129,18 @@ function Results({ slug, result, issues, language }: AppraisalContext & { result
         }
       />
     </>
+  );
+}
+
+/** The table's numbers before the last change. */
+function formerOf({ was, document }: Result): ReadonlyMap<string, FormerRow> | null {
+  if (!was) return null;
+  const { direction } = document.question.outcome;
+  return new Map(
+    was.comparison.rows.map(({ id, cost, health, icer }) => [
+      id,
+      { cost, outcome: toHealth(health, direction), icer, nmb: was.answer.nmb.get(id) ?? null },
+    ]),
   );
 }
 

@@ -131,5 +131,15 @@ function Reading({ weighed, pair, result, max, money }: ReadingProps) {
   if (weighed.levelAt !== null && weighed.levelAt > max) {
     sentences.push(t('beam.levelBeyond', { threshold: thresholdWords(weighed.levelAt) }));
   }
+  const before = result.was && levelBefore(result.was);
+  if (before !== null && before !== weighed.levelAt) {
+    sentences.push(t('levers.wasLevel', { threshold: thresholdWords(before) }));
+  }
   return <p className="mt-2 max-w-[62em] text-mute">{sentences.join(' ')}</p>;
+}
+
+/** Where the arm lay level before the last change, for the pair that it weighed then. */
+function levelBefore({ comparison, answer }: NonNullable<Result['was']>): number | null {
+  const pair = defaultPair(comparison.rows, answer.best);
+  return pair ? lever(pair, answer.threshold).levelAt : null;
 }
