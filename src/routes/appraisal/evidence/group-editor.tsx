@@ -21,7 +21,7 @@ export function GroupEditor({ group, index }: GroupProps & { readonly index: num
   const { change, issuesAt } = useEditing();
   const at: Place = ['groups', { id: group.id }];
   return (
-    <div className="grid gap-3">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-3">
       <div className="flex flex-wrap items-end gap-3">
         <TextField
           label={t('editing.label')}
@@ -112,7 +112,7 @@ function Normal({ group }: GroupProps<'multivariateNormal'>) {
   const names = useMemberNames(group);
   const at: Place = ['groups', { id: group.id }];
   return (
-    <div className="grid gap-3">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-3">
       <SelectField<'identity' | 'log'>
         label={t('groups.scale')}
         className="max-w-72"
@@ -164,7 +164,7 @@ function Matrix({ group, field, matrix, isUnit = false }: MatrixProps) {
     );
   return (
     <section
-      className="overflow-x-auto"
+      className="min-w-0 overflow-x-auto"
       aria-label={t(`groups.${field}`)}
       // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls sideways is reached by keyboard
       tabIndex={0}

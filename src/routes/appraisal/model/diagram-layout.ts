@@ -2,7 +2,7 @@
  *   diagramLayout(states, moves, first, width): DiagramLayout
  *
  * States and movements laid out by themselves: the living in layers from top to bottom, by
- * how many moves they are from the start; the dead in a column of their own on the right.
+ * how many moves they are from where most start; the dead in a column of their own on the right.
  * Pure geometry, in px.
  */
 import type { State } from '../../../../shared/model/document.ts';
@@ -57,7 +57,7 @@ export function diagramLayout(
   return { boxes, boxWidth, height, arrows: arrowsOf(boxes, moves, boxWidth) };
 }
 
-/** Ids by their distance in moves from the start; who cannot be reached comes last. */
+/** Ids by their distance in moves from the start; who cannot be reached comes last, each by itself. */
 function layersOf(
   living: readonly State[],
   moves: readonly Move[],
@@ -73,7 +73,7 @@ function layersOf(
     const next = new Set(moves.filter(({ from }) => here.has(from)).map(({ to }) => to));
     layer = living.filter(({ id }) => left.has(id) && next.has(id)).map(({ id }) => id);
   }
-  return left.size > 0 ? [...layers, [...left]] : layers;
+  return [...layers, ...[...left].map((id) => [id])];
 }
 
 function arrowsOf(boxes: readonly Box[], moves: readonly Move[], boxWidth: number) {

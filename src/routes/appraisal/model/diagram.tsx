@@ -25,8 +25,7 @@ export function Diagram({ strategy: given }: DiagramProps) {
   const strategy = given === undefined ? known : given;
   const moves = useMemo(() => movesOf(document, strategy), [document, strategy]);
   const layout = useMemo(() => {
-    const { remainder, shares } = document.start;
-    const first = [remainder, ...shares.map(({ state }) => state)];
+    const first = [document.start.remainder];
     return diagramLayout(document.states, moves, first, Math.max(width, 240));
   }, [document, moves, width]);
   return (
@@ -77,7 +76,7 @@ export function Diagram({ strategy: given }: DiagramProps) {
         </svg>
       </div>
       <details className="mt-1">
-        <summary className="flex min-h-10 items-center text-sm text-mute">
+        <summary className="flex min-h-10 items-center text-sm text-mute underline">
           {t('model.diagram.list', { count: moves.length })}
         </summary>
         <ul className="grid gap-1 text-sm">

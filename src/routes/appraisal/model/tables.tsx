@@ -56,7 +56,7 @@ function TableEditor({ table, index }: TableProps & { readonly index: number }) 
   const { id, label, symbol, unit, kind, interpolation } = table;
   const at: Place = ['tables', { id }];
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       <div className="grid gap-3 sm:grid-cols-2 lg:grid-cols-5">
         <TextField
           label={t('editing.label')}
@@ -128,7 +128,7 @@ function Grid({ table }: TableProps) {
   );
   return (
     <section
-      className="max-h-96 overflow-auto"
+      className="max-h-96 min-w-0 overflow-auto"
       aria-label={label}
       // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls is reached by keyboard
       tabIndex={0}
