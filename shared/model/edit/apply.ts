@@ -5,7 +5,8 @@
  *
  * Pure: the document given is never touched, and what no edit reaches is shared with
  * it. An edit can leave a document that does not hold together (that is for
- * `checkDocument` to say); one that has no place in the document throws.
+ * `checkDocument` to say); one that has no place in the document throws. Nothing is
+ * filled in: a field with a default that is unset stays absent until the document is read.
  */
 import type { ModelDocument } from '../document.ts';
 import { HOSTILE_KEYS } from '../names.ts';

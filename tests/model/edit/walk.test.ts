@@ -92,7 +92,7 @@ class Walk {
   private change(): void {
     // Operations are offered where the shape of the document is sound, as in the app.
     const sound = this.answer.document ?? ('draft' in this.answer ? this.answer.draft : null);
-    const operate = sound !== null && this.dice.next() < 0.5;
+    const operate = sound !== null && isWhole(this.document) && this.dice.next() < 0.5;
     const edits = operate
       ? operation(this.document, this.dice)
       : [randomEdit(this.document, this.dice)];
@@ -114,6 +114,11 @@ class Walk {
     if (!isSound) expect.fail(`unsound answer: ${JSON.stringify(issues)}`);
     this.counts[document ? 'valid' : 'explained'] += 1;
   }
+}
+
+/** A list that was unset reads as empty, but there is none to put anything into. */
+function isWhole(document: ModelDocument): boolean {
+  return KINDS.every((what) => Array.isArray(itemsOf(document, what)));
 }
 
 function anyTarget(document: ModelDocument, dice: Dice): Target {
