@@ -11,6 +11,7 @@ export function createRouter() {
       HydrateFallback: RootLoading,
       children: [
         { index: true, lazy: () => import('./routes/appraisals/page.tsx') },
+        { path: 'settings', lazy: () => import('./routes/settings/page.tsx') },
         {
           path: 'appraisals/:slug',
           lazy: () => import('./routes/appraisal/layout.tsx'),

@@ -2,8 +2,8 @@
 import type { Words } from './words.ts';
 
 export const history: Words['history'] = {
-  title_one: '{{count}} version',
-  title_other: '{{count}} versions',
+  title_one: '{{count}} version gardée',
+  title_other: '{{count}} versions gardées',
   noneYet: 'Rien n’a encore été gardé',
   save: 'Enregistrer une version',
   saved: 'La version est enregistrée.',

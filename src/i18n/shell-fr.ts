@@ -17,9 +17,7 @@ export const shell: Pick<Words, keyof typeof english> = {
     retry: 'Réessayer',
     export: 'Exporter un fichier',
     dismiss: 'Fermer',
-    restored: 'Rétablie',
     settings: 'Réglages',
-    keys: 'Touches',
   },
   store: {
     full: 'Il n’y a plus de place sur cet appareil. Libérez de l’espace, ou exportez l’évaluation dans un fichier.',
@@ -97,5 +95,41 @@ export const shell: Pick<Words, keyof typeof english> = {
         body: 'Une maladie terminée dès le premier cycle, et ce qu’elle laisse.',
       },
     },
+  },
+  settings: {
+    look: 'Langue et apparence',
+    person: 'Vous',
+    work: 'Tirages',
+    samples: 'Tirages d’une nouvelle évaluation',
+    samplesHelp: 'L’usage est de {{number}} ou plus. Chaque évaluation garde son propre nombre.',
+    workers: 'Simulateurs à l’œuvre en même temps',
+    workersHelp:
+      'Les résultats n’en dépendent pas. En vigueur à la prochaine ouverture de la page.',
+    workersAuto_one: 'Selon l’appareil ({{count}})',
+    workersAuto_other: 'Selon l’appareil ({{count}})',
+    storage: 'Stockage',
+    appraisals_one: '{{count}} évaluation est gardée sur cet appareil.',
+    appraisals_other: '{{count}} évaluations sont gardées sur cet appareil.',
+    room: '{{used}} Mo occupés sur {{all}} Mo environ.',
+    kept: {
+      granted: 'Le navigateur promet de garder ces données.',
+      refused:
+        'Le navigateur peut effacer ces données si la place vient à manquer. Exportez dans un fichier ce qui compte.',
+      unknown:
+        'Ce navigateur ne dit pas s’il garde les données. Exportez dans un fichier ce qui compte.',
+    },
+    keep: 'Garder mes données',
+  },
+  keys: {
+    title: 'Touches du clavier',
+    undo: { keys: 'Ctrl ou Cmd + Z', does: 'Annule la dernière modification' },
+    redo: { keys: 'Ctrl ou Cmd + Maj + Z', does: 'La rétablit' },
+    keys: { keys: 'Touche\u00A0?', does: 'Montre ces touches, hors d’un champ' },
+    poise: { keys: 'Flèches', does: 'Déplacent le poids, ou un curseur, d’un pas' },
+    poiseFar: {
+      keys: 'Page préc., Page suiv., Début, Fin',
+      does: 'Le déplacent plus loin, ou au bout',
+    },
+    close: { keys: 'Échap', does: 'Ferme ce qui couvre la page' },
   },
 };

@@ -16,7 +16,9 @@ const UNKEPT = 'unkept';
 export async function beginFromTemplate(slug: TemplateSlug): Promise<string> {
   const words = await templateWords(getSettings().language);
   const year = new Date().getFullYear();
-  const document = TEMPLATES[slug]({ id: slug, year, words });
+  const { samples } = getSettings();
+  const template = TEMPLATES[slug]({ id: slug, year, words });
+  const document = { ...template, analysis: { ...template.analysis, samples } };
   const source = slug === 'empty' ? 'empty' : (`template:${slug}` as const);
   return orShown({ document, source }, async (origin) => (await createAppraisal(origin)).id);
 }

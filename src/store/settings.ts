@@ -14,7 +14,14 @@ export interface Settings {
   readonly theme: Theme;
   /** Money per unit of outcome, by appraisal. */
   readonly thresholds: Readonly<Record<string, number>>;
+  /** Draws that a new appraisal begins with. */
+  readonly samples: number;
+  /** Simulators at work at once; null where the device's cores decide. */
+  readonly workers: number | null;
 }
+
+/** Draws of a new appraisal where the reader chose no other number. */
+export const FIRST_SAMPLES = 1_000;
 
 const KEY = 'steelyard.settings';
 const listeners = new Set<() => void>();
@@ -51,6 +58,8 @@ function read(): Settings {
     language: LANGUAGES.find((language) => language === kept.language) ?? deviceLanguage(),
     theme: THEMES.find((theme) => theme === kept.theme) ?? 'system',
     thresholds: numbersOf(kept.thresholds),
+    samples: wholeOf(kept.samples, 0, 1_000_000) ?? FIRST_SAMPLES,
+    workers: wholeOf(kept.workers, 1, 64),
   };
 }
 
@@ -68,6 +77,11 @@ function numbersOf(value: unknown): Record<string, number> {
   const isAmount = (entry: [string, unknown]): entry is [string, number] =>
     typeof entry[1] === 'number' && Number.isFinite(entry[1]) && entry[1] >= 0;
   return Object.fromEntries(Object.entries(value).filter(isAmount));
+}
+
+function wholeOf(value: unknown, min: number, max: number): number | null {
+  const isWhole = typeof value === 'number' && Number.isInteger(value);
+  return isWhole && value >= min && value <= max ? value : null;
 }
 
 /** The first of the device's languages that the interface speaks; English otherwise. */

@@ -1,5 +1,6 @@
 /** The page's one pool: workers start with the first document that is run. */
 import type { ModelDocument } from '../../shared/model/document.ts';
+import { getSettings } from '../store/settings.ts';
 import { createPool, type Job, type Pool } from './pool.ts';
 import { poolSize, spawnSimulator } from './spawn.ts';
 
@@ -8,7 +9,7 @@ const keys = new WeakMap<ModelDocument, string>();
 let count = 0;
 
 export function appPool(): Pool {
-  pool ??= createPool(spawnSimulator, poolSize());
+  pool ??= createPool(spawnSimulator, poolSize(getSettings().workers));
   return pool;
 }
 

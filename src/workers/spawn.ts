@@ -34,7 +34,11 @@ export function spawnSimulator(): SimulatorWorker<RemoteOf<DraftSimulator>> {
   return { remote, failed, stop };
 }
 
-/** All cores but one, which the page keeps; never more than four, for small memories. */
-export function poolSize(): number {
-  return Math.min(4, Math.max(1, (navigator.hardwareConcurrency || 2) - 1));
+/** For small memories. */
+export const MOST_WORKERS = 4;
+
+/** As many as chosen; else all cores but one, which the page keeps. */
+export function poolSize(chosen: number | null): number {
+  const cores = chosen ?? (navigator.hardwareConcurrency || 2) - 1;
+  return Math.min(MOST_WORKERS, Math.max(1, cores));
 }

@@ -7,6 +7,7 @@ import { Preferences } from '../../components/preferences.tsx';
 import { Rail, type RailStep } from '../../features/rail/rail.tsx';
 import { formatNumber } from '../../i18n/format.ts';
 import { useSettings } from '../../store/settings.ts';
+import { KeysHelp } from './keys-help.tsx';
 import { Notices } from './notices.tsx';
 import { useSession } from './session-context.ts';
 import { UndoButtons } from './undo-buttons.tsx';
@@ -29,7 +30,9 @@ export function Frame({ strip, children }: FrameProps) {
         <Brand />
         <div className="mt-5">
           <Rail steps={steps} />
-          <OtherPlaces />
+          <OtherPlaces>
+            <KeysHelp />
+          </OtherPlaces>
         </div>
         <div className="mt-auto pt-6 pr-5">
           <Preferences stacked />
@@ -74,7 +77,7 @@ export function Frame({ strip, children }: FrameProps) {
             </div>
           </header>
           <Notices />
-          <div className="print:hidden">{strip}</div>
+          <div className="bg-paper lg:sticky lg:top-0 lg:z-10 print:hidden">{strip}</div>
           <main id="main" tabIndex={-1} className="min-w-0 outline-none">
             {children}
           </main>
@@ -99,24 +102,27 @@ function useSteps({ parameters }: ModelDocument): readonly RailStep[] {
       name: t('steps.evidence'),
       fact: formatNumber(parameters.length, language),
     },
+    { to: 'model', name: t('steps.model') },
     { to: 'results', name: t('steps.results') },
     { to: 'uncertainty', name: t('steps.uncertainty') },
+    { to: 'brief', name: t('brief.step') },
     { to: 'history', name: t('steps.history') },
   ];
 }
 
-function OtherPlaces() {
+function OtherPlaces({ children }: { children?: ReactNode }) {
   const { t } = useTranslation();
   const style = 'flex min-h-11 items-center text-mute hover:text-ink';
   return (
-    <p className="mt-4">
+    <div className="mt-4">
       <Link to="/" className={style}>
         {t('rail.all')}
       </Link>
       <Link to="/settings" className={style}>
         {t('shell.settings')}
       </Link>
-    </p>
+      {children}
+    </div>
   );
 }
 

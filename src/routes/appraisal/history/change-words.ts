@@ -16,7 +16,7 @@ interface Reader {
 /** Such as "Cost of a visit: value". */
 export function placeWords({ place, label }: Change, { document, t }: Reader): string {
   const last = place.findLastIndex((step) => typeof step !== 'string');
-  const names = place.slice(last + 1).filter((step) => typeof step === 'string');
+  const names = fieldNames(place, last);
   const own = new Map(
     [...document.covariates, ...document.strategies].map(({ id, label: name }) => [id, name]),
   );
@@ -25,6 +25,12 @@ export function placeWords({ place, label }: Change, { document, t }: Reader): s
   const whole = last === place.length - 1;
   if (whole) return label ? t('history.place', { label, field: list }) : list;
   return label ? t('history.place', { label, field }) : field;
+}
+
+/** Of the field within its item; the question's own parts go without saying. */
+function fieldNames(place: Change['place'], last: number): string[] {
+  const names = place.slice(last + 1).filter((step) => typeof step === 'string');
+  return last < 0 && names.length > 1 ? names.slice(1) : names;
 }
 
 /** A field of the document by its name; one of a newer format as it stands there. */
@@ -45,9 +51,13 @@ export function changedValue(
   if (value === undefined || value === null || value === '') return t('history.nothing');
   if (typeof value === 'number') return formatValue(value, language);
   if (typeof value === 'boolean') return t(value ? 'frontier.yes' : 'frontier.no');
-  if (typeof value === 'string') return shortened(labelOf(value, field, document) ?? value);
+  if (typeof value === 'string')
+    return shortened((REFERENCES.has(field) && labelOf(value, document)) || value);
   if (field === 'distribution') {
     return distributionWords(value as unknown as Distribution, document, t, language);
+  }
+  if (Array.isArray(value) && value.every((item) => typeof item === 'string')) {
+    return shortened(value.map((id) => labelOf(id, document) ?? id).join(', '));
   }
   return shortened(JSON.stringify(value));
 }
@@ -64,10 +74,9 @@ const REFERENCES = new Set([
   'last',
 ]);
 
-function labelOf(id: string, field: string, document: ModelDocument): string | undefined {
-  if (!REFERENCES.has(field)) return undefined;
-  const { strategies, states, question } = document;
-  return [...strategies, ...states, ...question.thresholds].find((item) => item.id === id)?.label;
+function labelOf(id: string, { strategies, states, parameters, question }: ModelDocument) {
+  const named = [...strategies, ...states, ...parameters, ...question.thresholds];
+  return named.find((item) => item.id === id)?.label;
 }
 
 function shortened(text: string): string {

@@ -6,7 +6,7 @@ import { Decision } from './decision.tsx';
 import { Money, Thresholds } from './money.tsx';
 import { Outcome } from './outcome.tsx';
 import { Covariates, Profiles } from './profiles.tsx';
-import { About, Beneficiaries, ReferenceCase } from './rules.tsx';
+import { About, Beneficiaries, Draws, ReferenceCase } from './rules.tsx';
 import { Strategies } from './strategies.tsx';
 import { Discounting, Time } from './time.tsx';
 
@@ -33,6 +33,7 @@ export function Component() {
         <Covariates />
         <ReferenceCase />
         <Beneficiaries />
+        <Draws />
         <About />
       </fieldset>
     </EditingProvider>

@@ -1,7 +1,7 @@
 import { useTranslation } from 'react-i18next';
 import type { Json, Place } from '../../../../shared/model/edit/edit.ts';
 import { useEditing } from '../editing/context.tsx';
-import { LabelAt, NumberAt, TextAt } from './fields.tsx';
+import { LabelAt, NumberAt, SelectAt, TextAt } from './fields.tsx';
 import { Pair, Section } from './section.tsx';
 
 /** The reference case that the appraisal follows, where there is one. */
@@ -99,6 +99,44 @@ export function Beneficiaries() {
         remove={t('framing.removeBeneficiaries')}
         first={{ ...first, discountRate: rate }}
       />
+    </Section>
+  );
+}
+
+const PLANS = ['plain', 'lhs', 'sobol'] as const;
+
+/** How the uncertainty of parameters is drawn. */
+export function Draws() {
+  const { t } = useTranslation();
+  const { samples, seed, plan } = useEditing().document.analysis;
+  return (
+    <Section title={t('framing.drawsTitle')}>
+      <Pair>
+        <NumberAt
+          at={['analysis', 'samples']}
+          value={samples}
+          whole
+          min={0}
+          max={1_000_000}
+          label={t('framing.samples')}
+          help={t('framing.samplesHelp')}
+        />
+        <NumberAt
+          at={['analysis', 'seed']}
+          value={seed}
+          whole
+          min={0}
+          max={4_294_967_295}
+          label={t('framing.seed')}
+          help={t('framing.seedHelp')}
+        />
+        <SelectAt
+          at={['analysis', 'plan']}
+          value={plan}
+          options={PLANS.map((value) => ({ value, name: t(`framing.plans.${value}`) }))}
+          label={t('framing.plan')}
+        />
+      </Pair>
     </Section>
   );
 }
