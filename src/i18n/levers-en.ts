@@ -27,6 +27,7 @@ export const levers = {
   kept: 'Kept in the model as the scenario “{{label}}”.',
   inForce_one: 'What if: {{count}} lever is in force; the numbers are not the model’s own.',
   inForce_other: 'What if: {{count}} levers are in force; the numbers are not the model’s own.',
+  notice: 'What-ifs in force',
   reason: 'Set by a lever',
   wasLevel: 'Without the last change it was level at {{threshold}}.',
 };

@@ -29,6 +29,7 @@ export const levers = {
     'Et si\u00A0: {{count}} levier est en vigueur\u00A0; les nombres ne sont pas ceux du modèle.',
   inForce_other:
     'Et si\u00A0: {{count}} leviers sont en vigueur\u00A0; les nombres ne sont pas ceux du modèle.',
+  notice: 'Hypothèses en vigueur',
   reason: 'Fixé par un levier',
   wasLevel: 'Sans le dernier changement, l’équilibre était à {{threshold}}.',
 };

@@ -23,15 +23,15 @@ export interface Curves {
   readonly evpi: readonly EvpiPoint[];
 }
 
-const STEPS = 60;
-const kept = new WeakMap<Draws, Map<number, Curves>>();
+const kept = new WeakMap<Draws, Map<string, Curves>>();
 
-/** @param highest threshold, above 0 */
-export function curvesOf(draws: Draws, highest: number): Curves {
-  const known = kept.get(draws) ?? new Map<number, Curves>();
+/** @param thresholds rising from 0, money per unit of health */
+export function curvesOf(draws: Draws, thresholds: readonly number[]): Curves {
+  const known = kept.get(draws) ?? new Map<string, Curves>();
   kept.set(draws, known);
-  const found = known.get(highest) ?? makeCurves(draws, steps(highest));
-  known.set(highest, found);
+  const key = thresholds.join();
+  const found = known.get(key) ?? makeCurves(draws, thresholds);
+  known.set(key, found);
   return found;
 }
 
@@ -49,12 +49,6 @@ function makeCurves(draws: Draws, thresholds: readonly number[]): Curves {
     losses: expectedLoss(swept),
     evpi: evpi(swept),
   };
-}
-
-function steps(highest: number): number[] {
-  return Array.from({ length: STEPS + 1 }, (_, i) =>
-    Number(((highest * i) / STEPS).toPrecision(12)),
-  );
 }
 
 /** Persons whom the decision affects, discounted; null where the question does not say. */

@@ -123,6 +123,8 @@ function Lever(props: LeversPanelProps & { override: Override }) {
     override.type === 'setting' && override.setting !== 'horizon'
       ? formatPercent(value, language)
       : `${formatValue(value, language)} ${unit}`.trim();
+  const ends = (value: number) =>
+    unit === '' || override.type === 'setting' ? write(value) : formatValue(value, language);
   const drop = () =>
     levers.set(levers.overrides.filter((each) => targetOf(each) !== targetOf(override)));
   const value = override.type === 'variable' ? override.formula : override.value;
@@ -159,14 +161,14 @@ function Lever(props: LeversPanelProps & { override: Override }) {
             }
           />
           <p className="flex flex-wrap justify-between gap-x-3 text-sm text-mute">
-            <span>{write(range.low)}</span>
+            <span>{ends(range.low)}</span>
             <output htmlFor={field} className="font-bold text-ink">
               {write(value)}{' '}
               <span className="font-normal text-brass">
                 {value !== range.base && t('strip.was', { before: write(range.base) })}
               </span>
             </output>
-            <span>{write(range.high)}</span>
+            <span>{ends(range.high)}</span>
           </p>
         </>
       ) : (

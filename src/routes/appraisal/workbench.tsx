@@ -124,7 +124,10 @@ function LeversNotice({ levers }: { levers: Levers }) {
   const count = levers.overrides.length;
   if (count === 0) return null;
   return (
-    <p className="flex flex-wrap items-center gap-x-4 bg-brass-soft px-3">
+    <section
+      aria-label={t('levers.notice')}
+      className="flex flex-wrap items-center gap-x-4 bg-brass-soft px-3"
+    >
       {t('levers.inForce', { count })}
       <button
         type="button"
@@ -133,7 +136,7 @@ function LeversNotice({ levers }: { levers: Levers }) {
       >
         {t('levers.drop')}
       </button>
-    </p>
+    </section>
   );
 }
 

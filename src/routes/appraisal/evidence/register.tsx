@@ -5,6 +5,7 @@ import { addParameter } from '../../../../shared/formula/edit/add-parameter.ts';
 import type { Parameter } from '../../../../shared/model/document.ts';
 import { Field, INPUT } from '../../../components/form/field.tsx';
 import { SelectField } from '../../../components/form/select-field.tsx';
+import { ExplainButton } from '../../../features/explain/explain-button.tsx';
 import { distributionWords } from '../../../i18n/distribution-words.ts';
 import { formatNumber, formatValue } from '../../../i18n/format.ts';
 import { useEditing } from '../editing/context.tsx';
@@ -153,6 +154,7 @@ function Entry({ parameter, index, isOpen, onOpen }: EntryProps) {
         </Part>
         <div className="max-md:mt-1">
           <ItemActions target={{ what: 'parameter', id }} label={label} onCopy={onOpen} />
+          <ExplainButton subject={{ what: 'parameter', parameter: id }} of={label} />
         </div>
       </div>
       {isOpen && (

@@ -5,7 +5,7 @@ import type { Draws } from '../../../../shared/analysis/psa/draws.ts';
 import { usePageTitle } from '../../../components/page-title.ts';
 import { WhenSeen } from '../../../components/when-seen.tsx';
 import { Pending } from '../../../features/answer-strip/pending.tsx';
-import { beamScale } from '../../../features/beam/scale.ts';
+import { beamScale, ticks } from '../../../features/beam/scale.ts';
 import { type Curves, curvesOf } from '../../../store/curves.ts';
 import { type AppraisalContext, type Result, useAppraisalContext } from '../context.ts';
 import { type FigureWords, useFigureWords } from '../figure-words.ts';
@@ -87,15 +87,14 @@ function Figures(props: { result: Result; draws: Draws; words: FigureWords }) {
   // The poise moves first; what it is marked on follows when there is time.
   const threshold = useDeferredValue(result.now.threshold);
   const { thresholds } = result.document.question;
-  const { max } = useMemo(
-    () =>
-      beamScale(
-        thresholds.map(({ value }) => value),
-        result.comparison.rows.flatMap(({ icer }) => icer ?? []),
-      ),
-    [thresholds, result.comparison],
-  );
-  const curves = curvesOf(draws, Math.max(max, threshold));
+  const along = useMemo(() => {
+    const policy = thresholds.map(({ value }) => value);
+    const icers = result.comparison.rows.flatMap(({ icer }) => icer ?? []);
+    const { max, step } = beamScale(policy, icers);
+    // The graduations of the arm, and the policy thresholds themselves.
+    return [...new Set([...ticks(max, step), ...policy, max])].sort((a, b) => a - b);
+  }, [thresholds, result.comparison]);
+  const curves = curvesOf(draws, along);
   const all = { draws, threshold, words, curves };
   return (
     <div className="grid gap-x-10 gap-y-12 min-[1120px]:grid-cols-2">
