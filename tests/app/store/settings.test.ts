@@ -18,7 +18,13 @@ describe('settings', () => {
   it('begin with the first of the device’s languages that the app speaks', async () => {
     deviceSpeaks('pt-BR', 'fr-CD', 'en');
     const { getSettings } = await settings();
-    expect(getSettings()).toEqual({ language: 'fr', theme: 'system', thresholds: {} });
+    expect(getSettings()).toEqual({
+      language: 'fr',
+      theme: 'system',
+      thresholds: {},
+      samples: 1_000,
+      workers: null,
+    });
   });
 
   it('fall back on English', async () => {
@@ -34,10 +40,22 @@ describe('settings', () => {
   });
 
   it('lose no more than the part that is spoilt', async () => {
-    const spoilt = { theme: 'pink', language: 'fr', thresholds: { a: 'x', b: -1, c: 20 } };
+    const spoilt = {
+      theme: 'pink',
+      language: 'fr',
+      thresholds: { a: 'x', b: -1, c: 20 },
+      samples: -5,
+      workers: 3,
+    };
     localStorage.setItem(KEY, JSON.stringify(spoilt));
     const { getSettings } = await settings();
-    expect(getSettings()).toEqual({ language: 'fr', theme: 'system', thresholds: { c: 20 } });
+    expect(getSettings()).toEqual({
+      language: 'fr',
+      theme: 'system',
+      thresholds: { c: 20 },
+      samples: 1_000,
+      workers: 3,
+    });
   });
 
   it.each(['not json', 'null', '[]', '"x"'])('survive %s in their place', async (text) => {
