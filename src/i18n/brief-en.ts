@@ -44,8 +44,8 @@ export const brief = {
     },
     parts: {
       answer: 'The answer',
-      options: 'The options, a person',
-      beam: 'Cost against health',
+      options:
+        'The options, a person, in order of cost; each is weighed against the next cheaper one worth having',
       howSure: 'How sure are we?',
       whatWouldChange: 'What would change the answer',
       research: 'Is more research worth it?',
@@ -66,7 +66,6 @@ export const brief = {
         tied: 'the same as “{{because}}”',
         beyondNumbers: 'too large to say',
       },
-      per: 'against “{{against}}”',
     },
     gloss: {
       qaly: 'QALY: quality-adjusted life year, worth one year in full health.',

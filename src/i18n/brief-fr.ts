@@ -49,8 +49,8 @@ export const brief: Pick<Words, keyof typeof english> = {
     },
     parts: {
       answer: 'La réponse',
-      options: 'Les options, par personne',
-      beam: 'Le coût contre la santé',
+      options:
+        'Les options, par personne, par ordre de coût\u00A0; chacune est pesée contre la précédente qui vaut la peine',
       howSure: 'En est-on sûr\u00A0?',
       whatWouldChange: 'Ce qui changerait la réponse',
       research: 'Faut-il plus de recherche\u00A0?',
@@ -71,7 +71,6 @@ export const brief: Pick<Words, keyof typeof english> = {
         tied: 'comme «\u00A0{{because}}\u00A0»',
         beyondNumbers: 'trop grand pour être dit',
       },
-      per: 'par rapport à «\u00A0{{against}}\u00A0»',
     },
     gloss: {
       qaly: 'QALY\u00A0: année de vie ajustée sur la qualité, soit une année en pleine santé.',

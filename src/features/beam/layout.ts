@@ -49,6 +49,8 @@ export interface Loads {
   /** What hangs on the hook: its width, and whether it lifts. */
   readonly plate: { readonly width: number; readonly lifts: boolean };
   readonly poiseWidth: number;
+  /** px that the arm's far end may sink, where it is not the usual. */
+  readonly drop?: number;
 }
 
 export function beamLayout(
@@ -56,7 +58,7 @@ export function beamLayout(
   max: number,
   segments: readonly FrontierSegment[],
   names: ReadonlyMap<string, string>,
-  { plate, poiseWidth }: Loads,
+  { plate, poiseWidth, drop: given }: Loads,
 ): BeamLayout {
   const wide = width >= 640;
   const hookX = plate.width / 2 + 2;
@@ -64,7 +66,7 @@ export function beamLayout(
   const fulcrumX = plateEnd + (wide ? 28 : 16);
   const endX = width - poiseWidth / 2 - POISE_FLARE - 2;
   const room = endX - fulcrumX;
-  const drop = wide ? 48 : 26;
+  const drop = given ?? (wide ? 48 : 26);
   const xOf = (threshold: number) => fulcrumX + (Math.min(threshold, max) / max) * room;
   const namesFit = segments.every(
     ({ strategy, from, to }) => textWidth(names.get(strategy) ?? '') + 6 <= xOf(to) - xOf(from),

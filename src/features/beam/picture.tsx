@@ -37,10 +37,17 @@ export interface BeamDrawing {
   readonly layout: BeamLayout;
   readonly hook: Plate;
   readonly poise: Plate;
+  /** Degrees that the arm leans towards the poise. */
+  readonly angle: number;
+  /** Where the words under the poise stand: they go down with it. */
+  readonly footY: number;
 }
 
-/** @param width px that the picture is laid out in */
-export function drawBeam(look: BeamLook, width: number, t: TFunction): BeamDrawing {
+/**
+ * @param width px that the picture is laid out in
+ * @param drop px that the arm's far end may sink, where it is not the usual
+ */
+export function drawBeam(look: BeamLook, width: number, t: TFunction, drop?: number): BeamDrawing {
   const { scale, segments, lever, pair, names, language } = look;
   const hook = plate(
     t(`beam.plate.${lever.hook === 'lift' ? 'saved' : 'cost'}`),
@@ -53,8 +60,12 @@ export function drawBeam(look: BeamLook, width: number, t: TFunction): BeamDrawi
   const layout = beamLayout(width, scale.max, segments, names, {
     plate: { width: hook.width, lifts: lever.hook === 'lift' },
     poiseWidth: poise.width,
+    ...(drop === undefined ? {} : { drop }),
   });
-  return { layout, hook, poise };
+  const angle = lever.tilt * layout.maxAngle;
+  const reach = layout.xOf(look.threshold) - layout.fulcrum.x;
+  const footY = layout.fulcrum.y + FOOT + reach * Math.sin((angle * Math.PI) / 180);
+  return { layout, hook, poise, angle, footY };
 }
 
 interface BeamPictureProps extends BeamLook {
@@ -67,16 +78,14 @@ interface BeamPictureProps extends BeamLook {
 export function BeamPicture(props: BeamPictureProps) {
   const { scale, threshold, segments, notches, lever, names, language, drawing, moving } = props;
   const { t } = useTranslation();
-  const { layout, hook, poise } = drawing;
-  const { fulcrum, maxAngle, width } = layout;
-  const angle = lever.tilt * maxAngle;
+  const { layout, hook, poise, angle, footY } = drawing;
+  const { fulcrum, width } = layout;
   const turn = {
     transform: `rotate(${angle}deg)`,
     transformOrigin: `${fulcrum.x}px ${fulcrum.y}px`,
   };
   const level = lever.levelAt !== null && lever.levelAt <= scale.max ? lever.levelAt : null;
   const foot = props.wordFor(threshold);
-  const reach = layout.xOf(threshold) - fulcrum.x;
   const hang = { layout, moving, angle };
   return (
     <>
@@ -103,7 +112,7 @@ export function BeamPicture(props: BeamPictureProps) {
       </g>
       <text
         x={keepInside(layout.xOf(threshold), textWidth(foot, 16, true), width)}
-        y={fulcrum.y + FOOT + reach * Math.sin((angle * Math.PI) / 180)}
+        y={footY}
         textAnchor="middle"
         fontSize="16"
         fontWeight="700"
