@@ -104,8 +104,8 @@ export const modelling: Pick<Words, keyof typeof english> = {
       sd: 'Écart type',
       meanlog: 'Moyenne du log',
       sdlog: 'Écart type du log',
-      alpha: 'Alpha (a)',
-      beta: 'Bêta (b)',
+      alpha: 'Alpha (forme 1)',
+      beta: 'Bêta (forme 2)',
       shape: 'Forme',
       scale: 'Échelle',
       rate: 'Taux',
@@ -196,7 +196,7 @@ export const modelling: Pick<Words, keyof typeof english> = {
   },
   model: {
     parts: 'Parties du modèle',
-    formula: 'Expression',
+    formula: 'Formule',
     sections: {
       states: 'États',
       start: 'Départ',
@@ -273,7 +273,7 @@ export const modelling: Pick<Words, keyof typeof english> = {
       add: 'Ajouter une courbe pour',
     },
     variables: {
-      title_one: '{{count}} variable',
+      title_one: '{{count}} variable (formule)',
       title_other: '{{count}} variables (formules)',
       lead: 'Des formules nommées, pour ce qui sert à plus d’un endroit.',
       add: 'Ajouter une variable',

@@ -164,8 +164,8 @@ function Matrix({ group, field, matrix, isUnit = false }: MatrixProps) {
     );
   return (
     <section
-      className="min-w-0 overflow-x-auto"
-      aria-label={t(`groups.${field}`)}
+      className="relative min-w-0 overflow-x-auto"
+      aria-label={`${group.label}: ${t(`groups.${field}`)}`}
       // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls sideways is reached by keyboard
       tabIndex={0}
     >

@@ -128,7 +128,7 @@ function Grid({ table }: TableProps) {
   );
   return (
     <section
-      className="max-h-96 min-w-0 overflow-auto"
+      className="relative max-h-96 min-w-0 overflow-auto"
       aria-label={label}
       // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls is reached by keyboard
       tabIndex={0}
