@@ -8,7 +8,13 @@ import { type Site, startSite } from './support/site.ts';
 import { strangers, visit } from './support/visit.ts';
 
 const APPRAISAL = '/appraisals/keeping-hearts-well';
-const PAGES = ['/', `${APPRAISAL}/results`, `${APPRAISAL}/question`, `${APPRAISAL}/evidence`];
+const PAGES = [
+  '/',
+  `${APPRAISAL}/results`,
+  `${APPRAISAL}/uncertainty`,
+  `${APPRAISAL}/question`,
+  `${APPRAISAL}/evidence`,
+];
 
 let browser: Browser;
 let site: Site;
