@@ -7,7 +7,7 @@ import { hasErrors } from '../../../shared/model/issue.ts';
 import { AnswerStrip } from '../../features/answer-strip/answer-strip.tsx';
 import { formatMoney } from '../../i18n/format.ts';
 import { outcomeWords } from '../../i18n/outcome-words.ts';
-import { answerAt, type Comparison, compareMeans } from '../../store/answer.ts';
+import { type Answer, answerAt, type Comparison, compareMeans } from '../../store/answer.ts';
 import { type Opened, useBase } from '../../store/appraisal.ts';
 import { useDraws } from '../../store/draws.ts';
 import { FILE_SLUG } from '../../store/opened-file.ts';
@@ -65,14 +65,12 @@ function Whole({ slug, opened, document, base, issues, language }: WholeProps) {
     () => (basis === 'mean' && draws ? compareMeans(draws) : base),
     [basis, draws, base],
   );
-  const now = useMemo(
-    () => answerAt(document, comparison, draws, place.now),
-    [document, comparison, draws, place.now],
+  const answer = useMemo(
+    () => remembering((threshold) => answerAt(document, comparison, draws, threshold)),
+    [document, comparison, draws],
   );
-  const was = useMemo(
-    () => (place.was === null ? null : answerAt(document, comparison, draws, place.was)),
-    [document, comparison, draws, place.was],
-  );
+  const now = answer(place.now);
+  const was = place.was === null ? null : answer(place.was);
   const names = useMemo(
     () => new Map(document.strategies.map(({ id, label }) => [id, label])),
     [document],
@@ -111,6 +109,17 @@ function Whole({ slug, opened, document, base, issues, language }: WholeProps) {
       <Outlet context={{ slug, document, issues, language, result } satisfies AppraisalContext} />
     </Frame>
   );
+}
+
+/** The last answers: "was" is most often the "now" of a moment ago. */
+function remembering(work: (threshold: number) => Answer): (threshold: number) => Answer {
+  const known = new Map<number, Answer>();
+  return (threshold) => {
+    const answer = known.get(threshold) ?? work(threshold);
+    if (known.size > 50) known.clear();
+    known.set(threshold, answer);
+    return answer;
+  };
 }
 
 function WaitingStrip() {
