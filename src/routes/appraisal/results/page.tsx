@@ -8,6 +8,7 @@ import { usePageTitle } from '../../../components/page-title.ts';
 import { Steady } from '../../../components/steady.tsx';
 import { Frontier } from '../../../features/frontier/frontier.tsx';
 import { IncrementalTable } from '../../../features/incremental/incremental-table.tsx';
+import { IN_STRIP } from '../broken-strip.tsx';
 import { type AppraisalContext, type Result, useAppraisalContext } from '../context.ts';
 import { basisWords } from './basis.tsx';
 import { findingWords } from './finding-words.ts';
@@ -35,7 +36,7 @@ function NoResults({ issues, document }: AppraisalContext) {
     <>
       <h1 className="mt-7 text-2xl">{t('broken.title')}</h1>
       <p className="mt-1 mb-4 max-w-prose text-mute">{t('broken.body')}</p>
-      <IssueList issues={errors} document={document} />
+      {errors.length > IN_STRIP && <IssueList issues={errors} document={document} />}
     </>
   );
 }
