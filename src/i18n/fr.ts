@@ -39,7 +39,7 @@ export const fr: Words = {
   appraisals: {
     title: 'Évaluations',
     lead: 'Steelyard met en balance ce qu’une intervention de santé coûte et ce qu’elle apporte. Il fonctionne sur cet appareil, avec ou sans réseau.',
-    examples: 'Exemples travaillés',
+    examples: 'Exemples détaillés',
     none: 'Cette copie ne contient aucun exemple. Ouvrez ci-dessous un fichier de modèle à vous.',
     invented: 'Données inventées',
     published: 'Exemple publié',
@@ -63,7 +63,7 @@ export const fr: Words = {
   },
   steps: { question: 'Question', evidence: 'Données', results: 'Résultats' },
   state: {
-    example: 'Exemple travaillé, sur cet appareil',
+    example: 'Exemple détaillé, sur cet appareil',
     file: '{{file}}, ouvert jusqu’à la fermeture de la page',
   },
   threshold: '{{amount}} par {{unit}}',
