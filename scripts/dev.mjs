@@ -2,9 +2,11 @@
  * `npm run dev`: the hub and Vite's development server as one process on one port;
  * the app reloads as it changes, the hub starts anew.
  */
+import { followNpm } from './lib/follow-npm.mjs';
 import { install } from './lib/install.mjs';
-import { runPackage } from './lib/run.mjs';
 
 install();
-const watched = ['watch', '--include', 'shared/db/**', 'server/dev.ts'];
-process.exitCode = runPackage('tsx/dist/cli.mjs', watched) ? 0 : 1;
+followNpm();
+// tsx reads its own command line; in this process it gets our signals.
+process.argv.splice(2, Number.POSITIVE_INFINITY, 'watch', 'server/dev.ts');
+await import('tsx/cli');

@@ -3,6 +3,7 @@
  * already done is not done again. Plain Node: nothing is installed when it begins.
  */
 import { build } from './lib/build.mjs';
+import { followNpm } from './lib/follow-npm.mjs';
 import { install } from './lib/install.mjs';
 
 try {
@@ -12,6 +13,7 @@ try {
   console.error(error.message);
   process.exit(1);
 }
+followNpm();
 const { register } = await import('tsx/esm/api');
 register();
 await import('../server/main.ts');

@@ -9,7 +9,8 @@ import { openDatabase } from './db.ts';
  * security headers of the built app are left to the hub's own answers.
  */
 const config = readConfig(process.env);
-const hub = createApp({ database: openDatabase(config.dataFolder) });
+const database = openDatabase(config.dataFolder);
+const hub = createApp({ database });
 const vite = await createServer({ server: { middlewareMode: true } });
 
 const app = express();
@@ -21,3 +22,10 @@ app.use(vite.middlewares);
 app.listen(config.port, config.host, () => {
   console.log(`Steelyard for development: http://localhost:${config.port}`);
 });
+
+for (const signal of ['SIGTERM', 'SIGINT'] as const) {
+  process.once(signal, () => {
+    database.close();
+    process.exit(0);
+  });
+}

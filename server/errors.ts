@@ -3,7 +3,8 @@ import { Fault } from './fault.ts';
 
 /** Nothing is at this address. */
 export const notFound: RequestHandler = (request, _response, next) => {
-  next(new Fault('request.notFound', 404, { method: request.method, path: request.path }));
+  const path = request.originalUrl.replace(/\?.*$/, '');
+  next(new Fault('request.notFound', 404, { method: request.method, path }));
 };
 
 /** Says an error as data; what went wrong inside is logged, never sent. */

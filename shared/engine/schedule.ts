@@ -7,12 +7,12 @@
  * What varies with the cycle would be computed anew for each cohort; where several
  * cohorts need it, it is kept for all cycles (a tape).
  */
-import type { Accounts, Booking, StrategyAccounts } from './accounts.ts';
-import type { CohortPlan, CompiledModel } from './compile.ts';
-import { followedSubstates } from './followed.ts';
+import type { Accounts } from './accounts.ts';
+import type { CompiledModel } from './compile.ts';
 import { type Graph, type NodeId, VARIES } from './graph.ts';
 import { Layout } from './layout.ts';
 import type { Dot, Program, Slot, Stage, StrategyProgram } from './program.ts';
+import { type Roots, reachedFrom, sojournsOf, strategyRoots } from './roots.ts';
 
 /** Doubles that tapes of columns may take; beyond, values are computed anew: 64 MB. */
 const TAPE_LIMIT = 8_000_000;
@@ -32,82 +32,15 @@ export function schedule(
   options: ScheduleOptions,
 ): Program {
   const roots = model.plans.map((plan, index) =>
-    strategyRoots(model.graph, plan, accounts.plans[index]!, model.substates.all.length, options),
+    strategyRoots(
+      model.graph,
+      plan,
+      accounts.plans[index]!,
+      model.substates.all.length,
+      options.trace,
+    ),
   );
   return new Scheduler(model, accounts, roots, options).program();
-}
-
-/** What a strategy's simulation reads, all as columns. */
-interface Roots {
-  readonly followed: Int32Array;
-  readonly initial: NodeId[];
-  readonly steps: { substates: Int32Array; factors: NodeId[] }[] | null;
-  readonly curves: NodeId[] | null;
-  readonly steady: Booking[];
-  readonly varying: { tally: number; set: number; substates: Int32Array; factors: NodeId[] }[];
-  readonly atStart: { tally: number; value: NodeId }[];
-  readonly checks: CohortPlan['checks'];
-}
-
-function strategyRoots(
-  graph: Graph,
-  plan: CohortPlan,
-  accounts: StrategyAccounts,
-  substates: number,
-  options: ScheduleOptions,
-): Roots {
-  const followed = options.trace
-    ? Int32Array.from({ length: substates }, (_, index) => index)
-    : followedSubstates(plan, accounts);
-  const column = (node: NodeId) => graph.column(node);
-  const stepOf = (to: number) => {
-    const moves = plan.moves!.filter((move) => move.to === to);
-    return {
-      substates: Int32Array.from(moves, ({ from }) => from),
-      factors: moves.map(({ chance }) => column(chance)),
-    };
-  };
-  return {
-    followed,
-    initial: Array.from(followed, (substate) => column(plan.initial[substate]!)),
-    steps: plan.moves && Array.from(followed, stepOf),
-    curves: plan.curves && Array.from(followed, (substate) => column(plan.curves![substate]!)),
-    steady: accounts.steady.map((booking) => ({ ...booking, value: column(booking.value) })),
-    varying: gather(accounts.varying).map(({ tally, set, bookings }) => ({
-      tally,
-      set,
-      substates: Int32Array.from(bookings, ({ substate }) => substate),
-      factors: bookings.map(({ value }) => column(value)),
-    })),
-    atStart: accounts.atStart.map(({ tally, value }) => ({ tally, value: column(value) })),
-    checks: plan.checks,
-  };
-}
-
-/** Varying values of one tally and weight set, to be summed in one pass. */
-function gather(
-  bookings: readonly Booking[],
-): { tally: number; set: number; bookings: Booking[] }[] {
-  const groups = new Map<string, { tally: number; set: number; bookings: Booking[] }>();
-  for (const booking of bookings) {
-    const key = `${booking.tally} ${booking.set}`;
-    const group = groups.get(key) ?? { tally: booking.tally, set: booking.set, bookings: [] };
-    group.bookings.push(booking);
-    groups.set(key, group);
-  }
-  return [...groups.values()];
-}
-
-function rootNodes(roots: Roots): NodeId[] {
-  return [
-    ...roots.initial,
-    ...(roots.steps?.flatMap(({ factors }) => factors) ?? []),
-    ...(roots.curves ?? []),
-    ...roots.steady.map(({ value }) => value),
-    ...roots.varying.flatMap(({ factors }) => factors),
-    ...roots.atStart.map(({ value }) => value),
-    ...roots.checks.map(({ node }) => node),
-  ];
 }
 
 class Scheduler {
@@ -124,7 +57,7 @@ class Scheduler {
     private readonly options: ScheduleOptions,
   ) {
     this.graph = model.graph;
-    this.reached = roots.map((own) => reach(this.graph, rootNodes(own)));
+    this.reached = roots.map((own) => reachedFrom(this.graph, own));
     this.stages = this.placeAll();
     this.layout = new Layout(this.graph, options.width, model.cycles);
   }
@@ -294,26 +227,4 @@ class Scheduler {
     layout.endScratch();
     return program;
   }
-}
-
-function sojournsOf(roots: Roots): { set: number; substate: number }[] {
-  const found: { set: number; substate: number }[] = [];
-  for (const { set, substate } of roots.steady) {
-    if (!found.some((one) => one.set === set && one.substate === substate)) {
-      found.push({ set, substate });
-    }
-  }
-  return found;
-}
-
-/** Everything that the roots need, themselves included. */
-function reach(graph: Graph, roots: readonly NodeId[]): ReadonlySet<NodeId> {
-  const found = new Set<NodeId>();
-  const open = [...roots];
-  for (let node = open.pop(); node !== undefined; node = open.pop()) {
-    if (found.has(node)) continue;
-    found.add(node);
-    open.push(...graph.node(node).args);
-  }
-  return found;
 }

@@ -3,11 +3,12 @@
  * cycle for a block of draws at once, and add up what counts as it goes.
  */
 import type { Accounts, WeightSet } from './accounts.ts';
+import { type PreparedStrategy, prepareStrategy, type Side } from './addresses.ts';
 import type { CompiledModel } from './compile.ts';
 import { address, Executor } from './execute.ts';
 import type { Kernels, KernelsOf } from './kernels/kernels.ts';
 import type { ProblemLog } from './problems.ts';
-import type { Dot, Program, Slot, Stage, StrategyProgram } from './program.ts';
+import type { Program, Stage } from './program.ts';
 
 /** What a simulation tells while it runs; all addresses are good until the next call. */
 export interface Listener {
@@ -37,7 +38,7 @@ export class Simulator {
     this.kernels = kernelsOf(new Float64Array(program.size));
     this.executor = new Executor(this.kernels, program.width);
     for (const { at, value } of program.constants) this.kernels.memory[at] = value;
-    this.strategies = program.strategies.map((strategy) => prepare(strategy, program));
+    this.strategies = program.strategies.map((strategy) => prepareStrategy(strategy, program));
   }
 
   /**
@@ -228,75 +229,4 @@ export class Simulator {
   private set(index: number): WeightSet {
     return this.accounts.sets[index]!;
   }
-}
-
-/** Addresses of a sum of products whose occupancy is on one of the two sides. */
-interface PreparedDot {
-  readonly left: Int32Array;
-  readonly right: Factors;
-}
-
-/** One of the two sets of occupancy columns, with every address that lies in it. */
-interface Side {
-  readonly base: number;
-  readonly steps: readonly PreparedDot[];
-  readonly varying: readonly PreparedDot[];
-  /** Column of each sojourn's substate. */
-  readonly sojourns: Int32Array;
-}
-
-interface PreparedStrategy {
-  readonly program: StrategyProgram;
-  readonly occupancy: readonly [number, number];
-  readonly sides: readonly Side[];
-  /** By followed substate, its first sojourn: counted in the pass of the step; -1 for none. */
-  readonly firstSojourn: Int32Array;
-  /** By sojourn, whether it is the first of its substate. */
-  readonly isFirst: readonly boolean[];
-}
-
-/** The factors' addresses at a cycle; rewritten only where some are on a tape. */
-class Factors {
-  private readonly now: Int32Array;
-  private readonly onTape: boolean;
-
-  constructor(private readonly slots: readonly Slot[]) {
-    this.now = Int32Array.from(slots, ({ base }) => base);
-    this.onTape = slots.some(({ stride }) => stride !== 0);
-  }
-
-  at(cycle: number): Int32Array {
-    if (this.onTape) {
-      for (let k = 0; k < this.slots.length; k++) this.now[k] = address(this.slots[k]!, cycle);
-    }
-    return this.now;
-  }
-}
-
-function prepare(strategy: StrategyProgram, program: Program): PreparedStrategy {
-  const { occupancy } = program.work;
-  const first = (substate: number) =>
-    strategy.sojourns.findIndex((sojourn) => sojourn.substate === substate);
-  return {
-    program: strategy,
-    occupancy,
-    firstSojourn: strategy.followed.map(first),
-    isFirst: strategy.sojourns.map(({ substate }, k) => first(substate) === k),
-    sides: occupancy.map((base) => side(strategy, base, program.width)),
-  };
-}
-
-function side(strategy: StrategyProgram, base: number, width: number): Side {
-  const position = new Map(Array.from(strategy.followed, (substate, k) => [substate, k]));
-  const column = (substate: number) => base + position.get(substate)! * width;
-  const dot = ({ substates, factors }: Dot): PreparedDot => ({
-    left: substates.map(column),
-    right: new Factors(factors),
-  });
-  return {
-    base,
-    steps: strategy.steps?.map(dot) ?? [],
-    varying: strategy.varying.map((one) => dot(one.dot)),
-    sojourns: Int32Array.from(strategy.sojourns, ({ substate }) => column(substate)),
-  };
 }

@@ -44,7 +44,7 @@ export const fr: Words = {
   appraisals: {
     title: 'Évaluations',
     lead: 'Steelyard met en balance ce qu’une intervention de santé coûte et ce qu’elle apporte. Il fonctionne sur cet appareil, avec ou sans réseau.',
-    examples: 'Exemples travaillés',
+    examples: 'Exemples détaillés',
     none: 'Cette copie ne contient aucun exemple. Ouvrez ci-dessous un fichier de modèle à vous.',
     invented: 'Données inventées',
     published: 'Exemple publié',

@@ -104,7 +104,7 @@ it.each([
 ])('says that nothing is at %s, as data', async (path) => {
   const { status, body, headers } = await served().get(path).set('Accept', '*/*');
   expect(status).toBe(404);
-  expect(body.error.code).toBe('request.notFound');
+  expect(body.error).toMatchObject({ code: 'request.notFound', params: { path } });
   expect(headers['content-type']).toMatch(/json/);
 });
 

@@ -14,6 +14,7 @@ import {
   IncrementalTable,
 } from '../../../features/incremental/incremental-table.tsx';
 import { Levers } from '../../../features/levers/levers.tsx';
+import { IN_STRIP } from '../broken-strip.tsx';
 import { type AppraisalContext, type Result, useAppraisalContext } from '../context.ts';
 import { useSession } from '../session-context.ts';
 import { basisWords } from './basis.tsx';
@@ -44,7 +45,7 @@ function NoResults(context: AppraisalContext) {
     <>
       <h1 className="mt-7 text-2xl">{t('broken.title')}</h1>
       <p className="mt-1 mb-4 max-w-prose text-mute">{t('broken.body')}</p>
-      <IssueList issues={errors} document={document} />
+      {errors.length > IN_STRIP && <IssueList issues={errors} document={document} />}
       {levers.overrides.length > 0 && <WhatIf {...context} />}
     </>
   );

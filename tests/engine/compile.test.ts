@@ -1,4 +1,4 @@
-/** Time in state, survival curves and start shares through the whole engine. */
+/** What compile makes of time in state, survival curves and start shares, seen through a run. */
 import { describe, expect, it } from 'vitest';
 import { prepare } from '../../shared/engine/engine.ts';
 import type { ModelDocument } from '../../shared/model/document.ts';
