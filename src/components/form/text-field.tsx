@@ -56,6 +56,7 @@ export function TextField(props: TextFieldProps) {
           <textarea
             {...parts}
             {...common}
+            className={`${INPUT} field-sizing-content`}
             rows={lines}
             onChange={(event) => field.change(event.target.value)}
           />
