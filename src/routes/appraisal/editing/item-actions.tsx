@@ -39,7 +39,7 @@ export function ItemActions({ target, label, children, onCopy }: ItemActionsProp
     edit(removal.edits, t('editing.acts.removed', { what: label }));
   };
   return (
-    <div className="flex flex-wrap items-center gap-x-1">
+    <div className="flex flex-wrap items-center">
       {children}
       <Act name={t('editing.up', { label })} disabled={index <= 0} onClick={() => step(-1)}>
         <path d="M3 9 L8 4 L13 9 M8 4 V13" />

@@ -77,7 +77,7 @@ export function Register() {
       )}
       <div
         aria-hidden="true"
-        className="mt-5 grid border-b border-ink pb-1.5 text-sm text-mute max-md:hidden md:grid-cols-[1.5fr_6.5rem_1fr_1.2fr_10rem] md:gap-x-5"
+        className="mt-5 grid border-b border-ink pb-1.5 text-sm text-mute max-md:hidden md:grid-cols-[1.5fr_6.5rem_1fr_1.2fr_11rem] md:gap-x-5"
       >
         <span>{t('evidence.parameter')}</span>
         <span className="text-right">{t('evidence.value')}</span>
@@ -114,13 +114,13 @@ function Entry({ parameter, index, isOpen, onOpen }: EntryProps) {
   const isBroken = wrong.some(({ severity }) => severity === 'error');
   return (
     <li className="border-b border-rule py-3">
-      <div className="md:grid md:grid-cols-[1.5fr_6.5rem_1fr_1.2fr_10rem] md:gap-x-5">
+      <div className="md:grid md:grid-cols-[1.5fr_6.5rem_1fr_1.2fr_11rem] md:gap-x-5">
         <div className="min-w-0">
           <button
             type="button"
             aria-expanded={isOpen}
             onClick={() => onOpen(isOpen ? null : id)}
-            className="inline-flex min-h-10 items-start gap-2 text-left font-bold hover:text-brass"
+            className="inline-flex min-h-7 items-start gap-2 text-left font-bold hover:text-brass"
           >
             <span aria-hidden="true" className="text-brass">
               {isOpen ? '▾' : '▸'}
