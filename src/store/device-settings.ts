@@ -26,9 +26,9 @@ export async function putSetting<K extends keyof DeviceSettings>(
   await db.settings.put({ key, value });
 }
 
-/** Live: undefined while it is being read, null where nothing is kept. */
+/** Live: undefined while it is being read, null where nothing is kept or can be. */
 export function useSetting<K extends keyof DeviceSettings>(
   key: K,
 ): DeviceSettings[K] | null | undefined {
-  return useLiveQuery(() => getSetting(key), [key]);
+  return useLiveQuery(() => getSetting(key).catch(() => null), [key]);
 }
