@@ -1,5 +1,5 @@
 /** What the editors of evidence and model share: the draft, what is wrong with it, and the way to change it. */
-import { createContext, type ReactNode, useContext, useMemo } from 'react';
+import { createContext, type ReactNode, useContext, useMemo, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { ModelDocument } from '../../../../shared/model/document.ts';
 import type { Edit, Json, Place } from '../../../../shared/model/edit/edit.ts';
@@ -22,15 +22,29 @@ export interface Editing extends EditingProps {
   readonly change: (at: Place, value: Json | undefined, what: string) => void;
 }
 
+/** The same object as long as no name means anything else: formulas can change under it. */
+function useSteadyNames(document: ModelDocument): FormulaNames {
+  const { parameters, variables, tables, covariates } = document;
+  const [kept, setKept] = useState(() => formulaNames(document));
+  // biome-ignore lint/correctness/useExhaustiveDependencies: names are all that is read of it.
+  const now = useMemo(() => formulaNames(document), [parameters, variables, tables, covariates]);
+  if (now === kept || isSame(now, kept)) return kept;
+  setKept(now);
+  return now;
+}
+
+function isSame(a: FormulaNames, b: FormulaNames): boolean {
+  const text = ({ list, scope }: FormulaNames) => JSON.stringify([list, [...scope.names.values()]]);
+  return text(a) === text(b);
+}
+
 const EditingContext = createContext<Editing | null>(null);
 
 export function EditingProvider(props: EditingProps & { readonly children: ReactNode }) {
   const { document, issues, edit, children } = props;
   const { t } = useTranslation();
   const { language } = useSettings();
-  const { parameters, variables, tables, covariates } = document;
-  // biome-ignore lint/correctness/useExhaustiveDependencies: names are all that is read of it.
-  const names = useMemo(() => formulaNames(document), [parameters, variables, tables, covariates]);
+  const names = useSteadyNames(document);
   const editing: Editing = {
     document,
     issues,

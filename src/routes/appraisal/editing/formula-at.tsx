@@ -1,4 +1,5 @@
 /** Formulas of the document, each at its place. */
+import { memo } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { StrategyFormula } from '../../../../shared/model/document.ts';
 import type { Json, Place } from '../../../../shared/model/edit/edit.ts';
@@ -7,6 +8,23 @@ import { formulaFor } from '../../../../shared/model/strategy-formula.ts';
 import { FormulaField } from '../../../features/formula-field/formula-field.tsx';
 import { useEditing } from './context.tsx';
 import { IssueLines } from './issue-lines.tsx';
+
+/**
+ * Keystrokes come back as a new document: fields that it says nothing new to are left alone.
+ * A field is made anew where its place is another, so what it does on change never differs.
+ */
+const SteadyField = memo(FormulaField, (before, after) => {
+  const { label, quiet, value, names, issues, document } = after;
+  return (
+    before.label === label &&
+    before.quiet === quiet &&
+    before.value === value &&
+    before.names === names &&
+    (issues.length === 0
+      ? before.issues.length === 0
+      : before.document === document && before.issues === issues)
+  );
+});
 
 interface TextAtProps {
   readonly label: string;
@@ -22,7 +40,8 @@ interface TextAtProps {
 function TextAt({ label, quiet = false, text, at, path, what }: TextAtProps) {
   const { document, names, issuesAt, change } = useEditing();
   return (
-    <FormulaField
+    <SteadyField
+      key={JSON.stringify(at)}
       label={label}
       quiet={quiet}
       value={text}
