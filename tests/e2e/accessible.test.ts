@@ -14,6 +14,9 @@ const PAGES = [
   `${APPRAISAL}/uncertainty`,
   `${APPRAISAL}/question`,
   `${APPRAISAL}/evidence`,
+  `${APPRAISAL}/model/states`,
+  `${APPRAISAL}/model/movements`,
+  `${APPRAISAL}/model/payoffs`,
 ];
 
 let browser: Browser;
