@@ -5,7 +5,7 @@ import { textWidth } from '../text-width.ts';
 import { useWidth } from '../use-width.ts';
 import { Hatches, hatchFill } from './hatches.tsx';
 import { FillKey } from './key.tsx';
-import { keyRows, TEXT, valueAxis } from './layout.ts';
+import { keyRows, TEXT, TICK, valueAxis } from './layout.ts';
 
 export interface BarsProps {
   readonly bars: readonly {
@@ -59,7 +59,7 @@ export function Bars({ bars, parts, writeX, ...props }: BarsProps) {
           ticks={ticks}
           tickFormatter={(tick: number) => writeX(tick, x.decimals)}
           interval={0}
-          fontSize={TEXT}
+          tick={TICK}
           stroke="var(--rule-strong)"
         />
         <YAxis
@@ -67,7 +67,7 @@ export function Bars({ bars, parts, writeX, ...props }: BarsProps) {
           dataKey="name"
           width={left}
           interval={0}
-          fontSize={TEXT}
+          tick={TICK}
           axisLine={false}
           tickLine={false}
         />

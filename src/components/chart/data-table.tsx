@@ -18,7 +18,11 @@ export function DataTable({ table, label, most, language }: DataTableProps) {
   return (
     <>
       {/* biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reached by key */}
-      <section aria-label={label} tabIndex={0} className="max-h-[26rem] overflow-auto">
+      <section
+        aria-label={`${t('frontier.table')}: ${label}`}
+        tabIndex={0}
+        className="max-h-[26rem] overflow-auto"
+      >
         <table className="w-full border-collapse text-right text-sm">
           <thead className="sticky top-0 bg-paper text-mute">
             <tr>

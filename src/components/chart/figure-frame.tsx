@@ -15,6 +15,8 @@ export interface FigureSource {
 }
 
 interface FigureFrameProps {
+  /** Its place among the page's headings; `h2` where absent. */
+  readonly heading?: 'h2' | 'h3';
   /** The finding, in a sentence. */
   readonly title: string;
   /** What a picture of it would be called. */
@@ -35,7 +37,7 @@ interface FigureFrameProps {
 const MOST_ROWS = 200;
 
 export function FigureFrame(props: FigureFrameProps) {
-  const { title, language, table, children } = props;
+  const { heading: Heading = 'h2', title, language, table, children } = props;
   const { t } = useTranslation();
   const heading = useId();
   const box = useRef<HTMLDivElement>(null);
@@ -60,9 +62,9 @@ export function FigureFrame(props: FigureFrameProps) {
   };
   return (
     <section aria-labelledby={heading} className="min-w-0 break-inside-avoid">
-      <h3 id={heading} className="mb-2.5 text-lg">
+      <Heading id={heading} className="mb-2.5 text-lg">
         {title}
-      </h3>
+      </Heading>
       {shown === 'chart' ? (
         <div ref={box} className="relative">
           <Suspense

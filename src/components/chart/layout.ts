@@ -3,6 +3,8 @@ import { type Axis, axis } from '../axis.ts';
 import { textWidth } from '../text-width.ts';
 
 export const TEXT = 14;
+/** Numbers along an axis. */
+export const TICK = { fill: 'var(--mute)', fontSize: TEXT };
 /** Room above the plot for the title of the upright axis. */
 export const TOP = 30;
 /** Room below it for the numbers and the title of the level axis. */

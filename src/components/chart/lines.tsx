@@ -21,6 +21,7 @@ import {
   numbersWidth,
   spreadLabels,
   TEXT,
+  TICK,
   TOP,
   valueAxis,
 } from './layout.ts';
@@ -104,7 +105,7 @@ export function Lines(props: LinesProps) {
           ticks={[...across.ticks]}
           tickFormatter={(tick: number) => writeX(tick)}
           interval={0}
-          fontSize={TEXT}
+          tick={TICK}
           stroke="var(--rule-strong)"
         />
         <YAxis
@@ -114,7 +115,7 @@ export function Lines(props: LinesProps) {
           ticks={[...y.ticks]}
           tickFormatter={(tick: number) => writeY(tick)}
           interval={0}
-          fontSize={TEXT}
+          tick={TICK}
           axisLine={false}
           tickLine={false}
         />

@@ -5,7 +5,7 @@ import { textWidth } from '../text-width.ts';
 import { useWidth } from '../use-width.ts';
 import { Hatches, hatchFill } from './hatches.tsx';
 import { FillKey } from './key.tsx';
-import { BOTTOM, exactAxis, keyRows, numbersWidth, TEXT, TOP } from './layout.ts';
+import { BOTTOM, exactAxis, keyRows, numbersWidth, TEXT, TICK, TOP } from './layout.ts';
 
 export interface StackProps {
   readonly x: readonly number[];
@@ -63,7 +63,7 @@ export function Stack({ x, layers, writeX, writeY, ...props }: StackProps) {
           ticks={[...across.ticks]}
           tickFormatter={(tick: number) => writeX(tick)}
           interval={0}
-          fontSize={TEXT}
+          tick={TICK}
           stroke="var(--rule-strong)"
         />
         <YAxis
@@ -73,7 +73,7 @@ export function Stack({ x, layers, writeX, writeY, ...props }: StackProps) {
           ticks={[...y.ticks]}
           tickFormatter={(tick: number) => writeY(tick)}
           interval={0}
-          fontSize={TEXT}
+          tick={TICK}
           axisLine={false}
           tickLine={false}
         />

@@ -1,12 +1,12 @@
 /** Cost against health, one mark a strategy, the efficiency frontier drawn through. */
 import { useId } from 'react';
 import { useTranslation } from 'react-i18next';
+import { type Axis, axis } from '../../components/axis.ts';
 import { Swatch, strategyMark } from '../../components/strategy-mark.tsx';
 import { textWidth } from '../../components/text-width.ts';
 import { useWidth } from '../../components/use-width.ts';
 import { formatNumber } from '../../i18n/format.ts';
 import type { Language } from '../../store/settings.ts';
-import { type Axis, axis } from '../../components/axis.ts';
 import { placeLabels } from './place-labels.ts';
 
 export interface FrontierPoint {

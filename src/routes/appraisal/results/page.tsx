@@ -77,6 +77,8 @@ function Results(context: AppraisalContext & { result: Result }) {
   );
   const points = useMemo(() => frontierPoints({ document, comparison }), [document, comparison]);
   const explain = useExplain();
+  const { invented } = document.about;
+  const source = useMemo(() => ({ name: slug, invented }), [slug, invented]);
   const outcomes = new Map(points.map(({ id, outcome: value }) => [id, value]));
   return (
     <>
@@ -117,7 +119,7 @@ function Results(context: AppraisalContext & { result: Result }) {
           fewerIsBetter={direction === 'fewerIsBetter'}
           symbol={symbol}
           unit={outcome.plural}
-          fileName={slug}
+          source={source}
           language={language}
         />
       </div>

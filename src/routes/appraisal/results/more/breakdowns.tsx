@@ -52,6 +52,7 @@ export function Breakdowns({ run, words, best }: SectionProps) {
         />
       </div>
       <FigureFrame
+        heading="h3"
         title={title}
         file={`${measure}-by-${by}`}
         source={words.source}

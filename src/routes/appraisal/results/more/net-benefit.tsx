@@ -29,6 +29,7 @@ export function NetBenefit({ run, words, threshold }: SectionProps) {
   const title = titleOf(here, threshold, words);
   return (
     <FigureFrame
+      heading="h3"
       title={title}
       file="net-benefit"
       source={words.source}

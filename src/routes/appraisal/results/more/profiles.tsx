@@ -21,6 +21,7 @@ export function Profiles({ run, words, threshold }: SectionProps) {
   const count = each.filter(({ best }) => best === whole).length;
   return (
     <FigureFrame
+      heading="h3"
       title={t('more.profiles.title', {
         strategy: nameOf(whole ?? ''),
         count,

@@ -62,6 +62,7 @@ export function Trace({ run, words, best, onOccupancy }: TraceProps) {
       />
       <div className="mt-4 grid gap-x-10 gap-y-10 min-[1120px]:grid-cols-2">
         <FigureFrame
+          heading="h3"
           {...{ title, source, language, table }}
           file={`trace-${strategy}`}
           height={340}
@@ -70,6 +71,7 @@ export function Trace({ run, words, best, onOccupancy }: TraceProps) {
           <LazyStack {...axes} layers={states} alt={t('charts.alt', { title })} />
         </FigureFrame>
         <FigureFrame
+          heading="h3"
           {...{ source, language, table }}
           title={lines}
           file={`trace-lines-${strategy}`}
