@@ -17,9 +17,9 @@ export function DataTable({ table, label, most, language }: DataTableProps) {
   const { columns, rows } = table;
   return (
     <>
-      {/* biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reached by key */}
       <section
         aria-label={`${t('frontier.table')}: ${label}`}
+        // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reached by key
         tabIndex={0}
         className="max-h-[26rem] overflow-auto"
       >
