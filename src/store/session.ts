@@ -252,9 +252,11 @@ export class Session {
     if (!row) throw new StoreError('store.deleted');
     const { id } = row;
     await db.transaction('rw', db.appraisals, db.versions, db.journal, async () => {
-      if (made) await addAppraisal(db, made);
-      else if (!(await db.appraisals.get(id))) throw new StoreError('store.deleted');
-      for (const { row: step } of batch) await db.journal.add({ ...step, appraisal: id });
+      // Asked for together: each wait between would leave what was typed unwritten for longer.
+      const known = made ? addAppraisal(db, made).then(() => true) : db.appraisals.get(id);
+      const rows = batch.map(({ row: step }) => db.journal.add({ ...step, appraisal: id }));
+      const [found] = await Promise.all([known, ...rows]);
+      if (!found) throw new StoreError('store.deleted');
       if (title && title !== row.title) await db.appraisals.update(id, { title });
     });
     this.appraisal = title ? { ...row, title } : row;

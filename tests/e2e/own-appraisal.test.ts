@@ -4,6 +4,7 @@
  */
 import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { afterAll, beforeAll, expect, it, onTestFinished } from 'vitest';
+import example from '../../shared/examples/keeping-hearts-well.json' with { type: 'json' };
 import { en } from '../../src/i18n/en.ts';
 import { answerStrip, readAnswer } from './support/answer.ts';
 import { launchBrowser } from './support/browser.ts';
@@ -89,6 +90,32 @@ it('says what is broken, and shows no number until it is mended', async () => {
   await readAnswer(page);
 });
 
+it('makes an example one’s own at the first edit, and goes back to its first version', async () => {
+  const { page, problems } = await offline();
+  const { title } = example.question;
+  await page.getByRole('link', { name: title }).click();
+  await page.getByRole('link', { name: en.steps.question }).click();
+  const first = await readAnswer(page);
+  await box(page, en.framing.title).focus();
+  await page.keyboard.press('End');
+  await page.keyboard.type(', again');
+  expect(await box(page, en.framing.title).inputValue()).toBe(`${title}, again`);
+  await box(page, en.question.horizon).fill('15');
+  await saved(page);
+  expect(page.url()).not.toContain('keeping-hearts-well');
+  expect((await readAnswer(page)).values).not.toEqual(first.values);
+
+  await page.getByRole('link', { name: en.steps.history }).click();
+  await box(page, en.history.message).fill('A shorter horizon');
+  await page.getByRole('button', { name: en.history.save, exact: true }).click();
+  await page.getByText(en.history.saved).waitFor();
+  await page.getByRole('button', { name: `${en.history.compare}: ${en.history.first}` }).click();
+  await page.getByText(en.history.fields.horizon, { exact: true }).waitFor();
+  await page.getByRole('button', { name: `${en.history.goBack}: ${en.history.first}` }).click();
+  await expect.poll(() => readAnswer(page)).toEqual(first);
+  expect(problems).toEqual([]);
+});
+
 it('keeps what two tabs write, and loses the work of neither', async () => {
   const { page, context } = await offline();
   await beginFromTemplate(page);
@@ -108,8 +135,8 @@ it('keeps what two tabs write, and loses the work of neither', async () => {
 const TEXT = 'How should fever be treated where no doctor is?';
 /** Keystrokes after which the tab is killed: seeded once, spread over the text. */
 const MOMENTS = [1, 7, 18, 29, 46];
-/** Milliseconds between keystrokes of somebody who types fast. */
-const PACE = 60;
+/** Milliseconds between keystrokes at 100 words a minute. */
+const PACE = 120;
 
 it('loses at most the last keystroke when the tab is killed in the middle of typing', async () => {
   const { page: list, context } = await offline();
