@@ -43,7 +43,7 @@ export const brief: Pick<Words, keyof typeof english> = {
     },
     head: {
       brief: 'Synthèse pour une décision',
-      version: '{{date}}, version {{version}}',
+      version: 'du {{date}}, version {{version}}',
       for: 'Pour qui\u00A0: {{population}}. Où\u00A0: {{setting}}.',
       invented: 'Données inventées',
     },
