@@ -117,6 +117,25 @@ export const issues = {
     yearlyCostPerCycle: 'A cost a year is paid each cycle.',
     yearlyWeightPerCycle: 'A weight for a year is counted each cycle.',
   },
+  group: {
+    kind: '{{parameter}} in the Dirichlet group {{group}} is not a probability.',
+    memberFixed: '{{parameter}} is fixed and cannot be correlated in the group {{group}}.',
+    memberInTwo: '{{parameter}} is in two groups: {{other}} and {{group}}.',
+    notCorrelation:
+      'Correlations of the group {{group}} must lie from −1 to 1, with 1 on the diagonal.',
+    notFinite: 'The group {{group}} holds a number that is not finite.',
+    notPointing: '{{parameter}} is listed by the group {{group}} but not drawn in it.',
+    notPositive: 'Counts of the group {{group}} must be above 0.',
+    notPositiveDefinite:
+      'The matrix of the group {{group}} is not positive definite: no distribution has it.',
+    notSymmetric: 'The matrix of the group {{group}} is not symmetric.',
+    ownDistribution:
+      '{{parameter}} needs a distribution of its own to be ranked in the group {{group}}.',
+    repeatedMember: '{{parameter}} is a member of the group {{group}} twice.',
+    size: '{{name}} of the group {{group}} should have {{want}} items, one a member; it has {{got}}.',
+    unknownMember: 'The group {{group}} lists {{parameter}}, which does not exist.',
+    valuesSum: 'Base values of the probabilities in {{group}} sum to {{sum}}, not to 1.',
+  },
   groups: {
     doesNotListMember:
       '{{parameter}} says it belongs to the group {{group}}, which does not list it.',

@@ -130,6 +130,26 @@ export const issues = {
     yearlyCostPerCycle: 'Un coût par an est payé à chaque cycle.',
     yearlyWeightPerCycle: 'Un poids pour un an est compté à chaque cycle.',
   },
+  group: {
+    kind: '{{parameter}}, dans le groupe de Dirichlet {{group}}, n’est pas une probabilité.',
+    memberFixed: '{{parameter}} est fixe et ne peut être corrélé dans le groupe {{group}}.',
+    memberInTwo: '{{parameter}} figure dans deux groupes\u00A0: {{other}} et {{group}}.',
+    notCorrelation:
+      'Les corrélations du groupe {{group}} doivent aller de −1 à 1, avec 1 sur la diagonale.',
+    notFinite: 'Le groupe {{group}} contient un nombre qui n’est pas fini.',
+    notPointing: '{{parameter}} figure dans le groupe {{group}} mais n’y est pas tiré.',
+    notPositive: 'Les effectifs du groupe {{group}} doivent dépasser 0.',
+    notPositiveDefinite:
+      'La matrice du groupe {{group}} n’est pas définie positive\u00A0: aucune distribution ne l’admet.',
+    notSymmetric: 'La matrice du groupe {{group}} n’est pas symétrique.',
+    ownDistribution:
+      '{{parameter}} a besoin de sa propre distribution pour être classé dans le groupe {{group}}.',
+    repeatedMember: '{{parameter}} figure deux fois dans le groupe {{group}}.',
+    size: '{{name}} du groupe {{group}} devrait compter {{want}} éléments, un par membre\u00A0; il y en a {{got}}.',
+    unknownMember: 'Le groupe {{group}} mentionne {{parameter}}, qui n’existe pas.',
+    valuesSum:
+      'Les valeurs de base des probabilités de {{group}} ont pour somme {{sum}}, et non 1.',
+  },
   groups: {
     doesNotListMember: '{{parameter}} dit appartenir au groupe {{group}}, qui ne le mentionne pas.',
     memberNeedsOwnDistribution:
