@@ -1,6 +1,6 @@
 import { useTranslation } from 'react-i18next';
 
-const ACTS = ['undo', 'redo', 'keys', 'poise', 'poiseFar', 'close'] as const;
+const ACTS = ['undo', 'redo', 'find', 'keys', 'poise', 'poiseFar', 'close'] as const;
 
 /** Every key that does something of its own, and what it does. */
 export function KeysList() {

@@ -1,5 +1,6 @@
 import { useTranslation } from 'react-i18next';
 import { speak } from '../i18n/i18n.ts';
+import { LANGUAGE_NAMES } from '../i18n/language-names.ts';
 import {
   changeSettings,
   LANGUAGES,
@@ -8,9 +9,6 @@ import {
   type Theme,
   useSettings,
 } from '../store/settings.ts';
-
-/** Each language by its own name, so that a reader finds theirs in any of them. */
-const NAMES: Record<Language, string> = { en: 'English', fr: 'Français' };
 
 const SELECT = 'min-h-11 rounded-md border border-rule-strong bg-raised px-2 text-ink';
 
@@ -28,7 +26,7 @@ export function Preferences({ stacked = false }: { stacked?: boolean }) {
         >
           {LANGUAGES.map((option) => (
             <option key={option} value={option} lang={option}>
-              {NAMES[option]}
+              {LANGUAGE_NAMES[option]}
             </option>
           ))}
         </select>

@@ -1,6 +1,7 @@
 import { brief } from './brief-en.ts';
 import { charts } from './charts-en.ts';
 import { explain } from './explain-en.ts';
+import { finder } from './finder-en.ts';
 import { framing } from './framing-en.ts';
 import { history } from './history-en.ts';
 import { issues } from './issues-en.ts';
@@ -305,6 +306,7 @@ export const en = {
   ...modelling,
   charts,
   explain,
+  finder,
   levers,
   more,
   uncertainty,

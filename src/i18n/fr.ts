@@ -1,6 +1,7 @@
 import { brief } from './brief-fr.ts';
 import { charts } from './charts-fr.ts';
 import { explain } from './explain-fr.ts';
+import { finder } from './finder-fr.ts';
 import { framing } from './framing-fr.ts';
 import { history } from './history-fr.ts';
 import { issues } from './issues-fr.ts';
@@ -315,6 +316,7 @@ export const fr: Words = {
   ...modelling,
   charts,
   explain,
+  finder,
   levers,
   more,
   uncertainty,

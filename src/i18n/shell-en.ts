@@ -15,6 +15,9 @@ export const shell = {
     export: 'Export a file',
     dismiss: 'Close',
     settings: 'Settings',
+    help: 'Help',
+    helpOnStep: 'Help on this step',
+    helpFailed: 'The help could not be read from this device. Reload the page and try again.',
   },
   store: {
     full: 'This device has no room left. Free some space, or export the appraisal as a file.',
@@ -113,6 +116,7 @@ export const shell = {
     title: 'Keys',
     undo: { keys: 'Ctrl or Cmd + Z', does: 'Takes the last change back' },
     redo: { keys: 'Ctrl or Cmd + Shift + Z', does: 'Brings it again' },
+    find: { keys: 'Ctrl or Cmd + K', does: 'Finds a step, a parameter, an action' },
     keys: { keys: '?', does: 'Shows these keys, outside a field' },
     poise: { keys: 'Arrow keys', does: 'Move the poise, or a slider, by a step' },
     poiseFar: { keys: 'Page Up, Page Down, Home, End', does: 'Move it further, or to an end' },

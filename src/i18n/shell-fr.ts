@@ -18,6 +18,9 @@ export const shell: Pick<Words, keyof typeof english> = {
     export: 'Exporter un fichier',
     dismiss: 'Fermer',
     settings: 'Réglages',
+    help: 'Aide',
+    helpOnStep: 'Aide sur cette étape',
+    helpFailed: 'L’aide n’a pas pu être lue sur cet appareil. Rechargez la page et réessayez.',
   },
   store: {
     full: 'Il n’y a plus de place sur cet appareil. Libérez de l’espace, ou exportez l’évaluation dans un fichier.',
@@ -124,6 +127,7 @@ export const shell: Pick<Words, keyof typeof english> = {
     title: 'Touches du clavier',
     undo: { keys: 'Ctrl ou Cmd + Z', does: 'Annule la dernière modification' },
     redo: { keys: 'Ctrl ou Cmd + Maj + Z', does: 'La rétablit' },
+    find: { keys: 'Ctrl ou Cmd + K', does: 'Cherche une étape, un paramètre, une action' },
     keys: { keys: 'Touche\u00A0?', does: 'Montre ces touches, hors d’un champ' },
     poise: { keys: 'Flèches', does: 'Déplacent le poids, ou un curseur, d’un pas' },
     poiseFar: {

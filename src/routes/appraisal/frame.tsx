@@ -1,16 +1,21 @@
 import { type ReactNode, useRef } from 'react';
 import { useTranslation } from 'react-i18next';
-import { Link } from 'react-router-dom';
+import { Link, useLocation } from 'react-router-dom';
 import type { ModelDocument } from '../../../shared/model/document.ts';
 import { Brand } from '../../components/brand.tsx';
 import { Preferences } from '../../components/preferences.tsx';
+import { Finder } from '../../features/finder/finder.tsx';
+import { Help } from '../../features/help/help.tsx';
 import { Rail, type RailStep } from '../../features/rail/rail.tsx';
 import { formatNumber } from '../../i18n/format.ts';
+import { HELP_TOPICS } from '../../i18n/help-words.ts';
 import { useSettings } from '../../store/settings.ts';
 import { KeysHelp } from './keys-help.tsx';
 import { Notices } from './notices.tsx';
 import { useSession } from './session-context.ts';
 import { UndoButtons } from './undo-buttons.tsx';
+import { useFinderEntries } from './use-finder-entries.ts';
+import { useSought } from './use-sought.ts';
 import { WorkState } from './work-state.tsx';
 
 interface FrameProps {
@@ -22,17 +27,23 @@ export function Frame({ strip, children }: FrameProps) {
   const { t } = useTranslation();
   const { document } = useSession();
   const drawer = useRef<HTMLDialogElement>(null);
+  const keys = useRef<HTMLDialogElement>(null);
   const steps = useSteps(document);
   const close = () => drawer.current?.close();
+  const showKeys = () => {
+    close();
+    keys.current?.showModal();
+  };
+  const entries = useFinderEntries(steps, showKeys);
+  const go = useSought();
+  const topic = useTopic();
   return (
     <div className="lg:grid lg:grid-cols-[220px_1fr] print:block">
       <aside className="sticky top-0 hidden h-dvh flex-col overflow-y-auto p-5 pr-0 lg:flex print:hidden">
         <Brand />
         <div className="mt-5">
           <Rail steps={steps} />
-          <OtherPlaces>
-            <KeysHelp />
-          </OtherPlaces>
+          <OtherPlaces onKeys={showKeys} />
         </div>
         <div className="mt-auto pt-6 pr-5">
           <Preferences stacked />
@@ -51,12 +62,13 @@ export function Frame({ strip, children }: FrameProps) {
             </button>
           </div>
           <Rail steps={steps} onGo={close} />
-          <OtherPlaces />
+          <OtherPlaces onKeys={showKeys} />
           <div className="mt-auto pt-6">
             <Preferences stacked />
           </div>
         </div>
       </dialog>
+      <KeysHelp dialog={keys} />
       <div className="min-h-dvh min-w-0 border-rule lg:border-l print:border-0">
         <div className="mx-auto w-full max-w-[1280px] px-4 pb-12 sm:px-8 print:max-w-none print:p-0">
           <header className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b-2 border-ink py-2 print:hidden">
@@ -74,6 +86,8 @@ export function Frame({ strip, children }: FrameProps) {
             <div className="ml-auto flex flex-wrap items-center gap-x-3">
               <WorkState />
               <UndoButtons />
+              <Finder document={document} entries={entries} go={go} />
+              <Help topic={topic} />
             </div>
           </header>
           <Notices />
@@ -110,7 +124,13 @@ function useSteps({ parameters }: ModelDocument): readonly RailStep[] {
   ];
 }
 
-function OtherPlaces({ children }: { children?: ReactNode }) {
+/** The step in view, as the address tells it. */
+function useTopic() {
+  const step = useLocation().pathname.split('/')[3];
+  return HELP_TOPICS.find((topic) => topic === step) ?? 'results';
+}
+
+function OtherPlaces({ onKeys }: { onKeys: () => void }) {
   const { t } = useTranslation();
   const style = 'flex min-h-11 items-center text-mute hover:text-ink';
   return (
@@ -121,7 +141,9 @@ function OtherPlaces({ children }: { children?: ReactNode }) {
       <Link to="/settings" className={style}>
         {t('shell.settings')}
       </Link>
-      {children}
+      <button type="button" className={style} onClick={onKeys}>
+        {t('keys.title')}
+      </button>
     </div>
   );
 }

@@ -12,7 +12,7 @@ export function Component() {
   const { t } = useTranslation();
   usePageTitle(t('appraisals.title'));
   return (
-    <PlainPage>
+    <PlainPage help="appraisals">
       <h1 className="mt-8 text-3xl">{t('appraisals.title')}</h1>
       <p className="mt-2 max-w-[44em] text-lg text-mute">{t('appraisals.lead')}</p>
       <OwnAppraisals />

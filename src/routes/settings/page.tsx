@@ -18,7 +18,7 @@ export function Component() {
   const { t } = useTranslation();
   usePageTitle(t('shell.settings'));
   return (
-    <PlainPage hasChoices>
+    <PlainPage hasChoices help="settings">
       <h1 className="mt-8 mb-6 text-3xl">{t('shell.settings')}</h1>
       <Part title={t('settings.look')}>
         <Preferences stacked />

@@ -31,6 +31,8 @@ const SAME = new Set([
   'outcome.daly.singular',
   'strip.noNumber',
   'frontier.csv',
+  'finder.kinds.variable',
+  'finder.kinds.action',
   'charts.png',
   'charts.svg',
   'more.trace.cycle',

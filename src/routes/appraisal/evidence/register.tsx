@@ -10,6 +10,7 @@ import { distributionWords } from '../../../i18n/distribution-words.ts';
 import { formatNumber, formatValue } from '../../../i18n/format.ts';
 import { useEditing } from '../editing/context.tsx';
 import { ItemActions } from '../editing/item-actions.tsx';
+import { placeOf } from '../use-sought.ts';
 import { FILTERS, type Filter, sought } from './filter.ts';
 import { ParameterEditor } from './parameter-editor.tsx';
 
@@ -30,6 +31,8 @@ export function Register() {
   const { parameters } = document;
   const key = useDeferredValue(text);
   const found = sought(parameters, issues, key, filter, language);
+  // The one that is open stays, whatever is sought: it is being worked on, or was led to.
+  const shown = parameters.filter((one) => one.id === opened || found.includes(one));
   const uncertain = parameters.filter(({ distribution }) => distribution.type !== 'fixed').length;
   const add = () => {
     const { edits, id } = addParameter(document, { label: t('register.newLabel') });
@@ -85,7 +88,7 @@ export function Register() {
         <span>{t('evidence.source')}</span>
       </div>
       <ul className="max-md:mt-3 max-md:border-t max-md:border-ink">
-        {found.map((parameter) => (
+        {shown.map((parameter) => (
           <Entry
             key={parameter.id}
             parameter={parameter}
@@ -117,6 +120,7 @@ function Entry({ parameter, index, isOpen, onOpen }: EntryProps) {
       <div className="md:grid md:grid-cols-[1.5fr_6.5rem_1fr_1.2fr_11rem] md:gap-x-5">
         <div className="min-w-0">
           <button
+            id={placeOf(id)}
             type="button"
             aria-expanded={isOpen}
             onClick={() => onOpen(isOpen ? null : id)}

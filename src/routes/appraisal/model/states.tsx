@@ -9,6 +9,7 @@ import { TextField } from '../../../components/form/text-field.tsx';
 import { useEditing } from '../editing/context.tsx';
 import { IssueLines } from '../editing/issue-lines.tsx';
 import { ItemActions } from '../editing/item-actions.tsx';
+import { placeOf } from '../use-sought.ts';
 import { Diagram } from './diagram.tsx';
 import { SectionHead } from './section-head.tsx';
 
@@ -32,7 +33,12 @@ export function States() {
       <div className="mt-5 grid gap-x-10 gap-y-6 xl:grid-cols-[minmax(0,1fr)_minmax(0,25rem)]">
         <ul className="border-t border-ink">
           {document.states.map((state, index) => (
-            <li key={state.id} className="border-b border-rule py-3">
+            <li
+              key={state.id}
+              id={placeOf(state.id)}
+              tabIndex={-1}
+              className="border-b border-rule py-3"
+            >
               <StateEditor state={state} index={index} />
             </li>
           ))}

@@ -9,6 +9,7 @@ import { IssueLines } from '../editing/issue-lines.tsx';
 import { ItemActions } from '../editing/item-actions.tsx';
 import { KindSelect } from '../editing/kind-select.tsx';
 import { SymbolField } from '../editing/symbol-field.tsx';
+import { placeOf } from '../use-sought.ts';
 import { SectionHead } from './section-head.tsx';
 
 /** Named formulas, for what is used in more places than one. */
@@ -31,7 +32,12 @@ export function Variables() {
       </SectionHead>
       <ul className="mt-5 border-t border-ink">
         {document.variables.map((variable, index) => (
-          <li key={variable.id} className="border-b border-rule py-4">
+          <li
+            key={variable.id}
+            id={placeOf(variable.id)}
+            tabIndex={-1}
+            className="border-b border-rule py-4"
+          >
             <VariableEditor variable={variable} index={index} />
           </li>
         ))}

@@ -5,6 +5,7 @@ import { Swatch } from '../../../components/strategy-mark.tsx';
 import { useEditing } from '../editing/context.tsx';
 import { IssueLines } from '../editing/issue-lines.tsx';
 import { ItemActions } from '../editing/item-actions.tsx';
+import { placeOf } from '../use-sought.ts';
 import { LabelAt, TextAt } from './fields.tsx';
 import { Section } from './section.tsx';
 
@@ -53,7 +54,11 @@ function Strategy({ strategy, index, isNew }: StrategyProps) {
   const { id, label, description } = strategy;
   const at = ['strategies', { id }];
   return (
-    <li className="grid gap-2 border-t border-rule py-3 first:border-t-0 first:pt-0">
+    <li
+      id={placeOf(id)}
+      tabIndex={-1}
+      className="grid gap-2 border-t border-rule py-3 first:border-t-0 first:pt-0"
+    >
       <div className="flex flex-wrap items-center gap-x-3 gap-y-1">
         <Swatch index={index} />
         <LabelAt
