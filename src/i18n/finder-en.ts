@@ -17,7 +17,7 @@ export const finder = {
   },
   acts: {
     print: 'Print the brief',
-    language: 'Interface in {{language}}',
+    language: 'Language: {{language}}',
     theme: 'Theme: {{theme}}',
   },
 };

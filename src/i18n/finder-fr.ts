@@ -19,7 +19,7 @@ export const finder: Words['finder'] = {
   },
   acts: {
     print: 'Imprimer la synthèse',
-    language: 'Interface en {{language}}',
+    language: 'Langue\u00A0: {{language}}',
     theme: 'Thème\u00A0: {{theme}}',
   },
 };

@@ -71,12 +71,12 @@ export const help: HelpWords = {
         'Read the heading: it states the finding.',
         'Move the poise along the beam to try other thresholds. It marks the best strategy at each.',
         'Press Explain beside a number to see where it comes from.',
-        'Move a lever to try another value without changing the model.',
+        'Under “What if…”, add a lever to try another value without changing the model.',
         'Look at the trace: do as many people die, or recover, as you would expect?',
       ],
       wrong: [
         'No results: the model is broken. The strip on top lists what to mend.',
-        'While a lever is moved, the numbers are not those of the model. A notice says so on every step.',
+        'While a lever is in force, the numbers are not those of the model. A notice says so on every step.',
         'A strategy best by a hair may not be best at all: look at Uncertainty before you decide.',
         'A negative ratio has no meaning of its own. Look at whether the strategy saves or loses.',
       ],
@@ -84,7 +84,7 @@ export const help: HelpWords = {
     uncertainty: {
       what: 'How sure the answer is. Every uncertain number is drawn again and again, and the model is run for each draw.',
       todo: [
-        'Run the draws. A thousand is a start; use more for a final answer.',
+        'Let the draws finish. A thousand is a start; set how many on Question, and use more for a final answer.',
         'Read how often each strategy is best at your threshold.',
         'Read what it would be worth to know everything (EVPI): no study can be worth more.',
         'Check that the Monte Carlo standard error is small beside the difference that you decide on.',

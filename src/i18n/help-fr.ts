@@ -70,13 +70,13 @@ export const help: HelpWords = {
       todo: [
         'Lisez le titre\u00A0: il énonce le résultat.',
         'Déplacez le poids le long du fléau pour essayer d’autres seuils. Il montre la meilleure stratégie à chacun.',
-        'Demandez l’explication d’un nombre pour voir d’où il vient.',
-        'Bougez un levier pour essayer une autre valeur sans changer le modèle.',
+        'Appuyez sur Expliquer à côté d’un nombre pour voir d’où il vient.',
+        'Sous «\u00A0Et si…\u00A0», ajoutez un levier pour essayer une autre valeur sans changer le modèle.',
         'Regardez la trace\u00A0: y a-t-il autant de décès, ou de guérisons, que vous l’attendez\u00A0?',
       ],
       wrong: [
         'Pas de résultats\u00A0: le modèle contient une erreur. Le bandeau du haut dit quoi corriger.',
-        'Tant qu’un levier est bougé, les nombres ne sont pas ceux du modèle. Un avis le rappelle à chaque étape.',
+        'Tant qu’un levier est en vigueur, les nombres ne sont pas ceux du modèle. Un avis le rappelle à chaque étape.',
         'Une stratégie meilleure d’un cheveu ne l’est peut-être pas\u00A0: voyez l’incertitude avant de décider.',
         'Un rapport négatif n’a pas de sens à lui seul. Regardez si la stratégie fait gagner ou perdre.',
       ],
@@ -84,14 +84,14 @@ export const help: HelpWords = {
     uncertainty: {
       what: 'À quel point la réponse est sûre. Chaque nombre incertain est tiré encore et encore, et le modèle tourne pour chaque tirage.',
       todo: [
-        'Lancez les tirages. Mille suffisent pour commencer\u00A0; prenez-en plus pour une réponse définitive.',
+        'Laissez les tirages se finir. Mille suffisent pour commencer\u00A0; leur nombre se fixe à l’étape Question, prenez-en plus pour une réponse définitive.',
         'Lisez combien de fois chaque stratégie est la meilleure à votre seuil.',
         'Lisez ce qu’il vaudrait de tout savoir (EVPI)\u00A0: aucune étude ne peut valoir davantage.',
         'Vérifiez que l’erreur type de Monte-Carlo est petite à côté de la différence qui vous fait décider.',
       ],
       wrong: [
         'Seuls les paramètres qui ont une loi varient. Si la plupart sont fixes, la réponse paraît plus sûre qu’elle n’est.',
-        'Des paramètres liés mais tirés séparément faussent les chances. Groupez-les à l’étape des données.',
+        'Des paramètres liés mais tirés séparément faussent les chances. Groupez-les à l’étape Données.',
         'Le doute sur la structure du modèle n’est pas dans les tirages. Essayez pour cela des scénarios.',
         'Peu de tirages donnent des courbes en dents de scie\u00A0: c’est le hasard, pas un résultat.',
       ],

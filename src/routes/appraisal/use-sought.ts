@@ -16,7 +16,7 @@ export function useSought(): (to: string, id: string) => void {
   useEffect(() => {
     if (typeof sought !== 'string') return;
     const place = document.getElementById(placeOf(sought)) ?? document.getElementById('main');
-    place?.scrollIntoView?.({ block: 'center' });
+    place?.scrollIntoView?.({ block: 'start' });
     place?.focus({ preventScroll: true });
   }, [key, sought]);
   return useCallback(

@@ -76,14 +76,15 @@ describe('the finder', () => {
     expect(document.activeElement).toBe(button);
   });
 
-  it.each([
+  const { parameters, variables } = tinyDocument();
+  const leads: readonly (readonly [string, string, string])[] = [
     ['Treatment', 'question', 'treatment'],
     ['Alive', 'model/states', 'alive'],
-    ...tinyDocument().parameters.map(
-      ({ id, symbol }) => [symbol, `evidence?parameter=${id}`, id] as const,
-    ),
-    ...tinyDocument().variables.map(({ id, symbol }) => [symbol, 'model/variables', id] as const),
-  ])('leads from "%s" to %s', async (text, to, id) => {
+    ...parameters.map(({ id, symbol }) => [symbol, `evidence?parameter=${id}`, id] as const),
+    ...variables.map(({ id, symbol }) => [symbol, 'model/variables', id] as const),
+  ];
+
+  it.each(leads)('leads from "%s" to %s', async (text, to, id) => {
     const { go } = setUp();
     fireEvent.keyDown(document.body, { key: 'k', ctrlKey: true });
     const field = await opened();
