@@ -17,6 +17,7 @@ import { digestOf } from '../model/digest.ts';
 import type { ModelDocument, Question } from '../model/document.ts';
 import { DocumentError, hasErrors, type Issue } from '../model/issue.ts';
 import { digestOfResults } from '../model/results-digest.ts';
+import { optionsOf } from './breakdown/options-of.ts';
 import { toHealth } from './direction.ts';
 import { type IncrementalRow, incremental } from './incremental.ts';
 import { netMonetaryBenefit } from './net-benefit.ts';
@@ -117,15 +118,11 @@ export function appraise(
 
 /** The base case by strategy, in document order, with its place on the frontier. */
 export function appraiseBase(
-  { strategies, question }: ModelDocument,
+  document: ModelDocument,
   base: BaseRun,
   threshold: number,
 ): AppraisedStrategy[] {
-  const options = base.strategies.map(({ id, cost, outcome }) => ({
-    id,
-    cost,
-    health: toHealth(outcome, question.outcome.direction),
-  }));
+  const options = optionsOf(document, base.strategies);
   const rows = new Map(incremental(options).map((row) => [row.id, row]));
   return base.strategies.map((run, index) => {
     const { status, icer, against, tiedWith } = rows.get(run.id) as IncrementalRow;
@@ -133,7 +130,7 @@ export function appraiseBase(
     const { id, cost, outcome, lifeYears, byProfile, byPayoff, trace } = run;
     return {
       id,
-      name: strategies[index]?.label ?? id,
+      name: document.strategies[index]?.label ?? id,
       ...{ cost, outcome, lifeYears, status, icer, against, tiedWith },
       nmb: netMonetaryBenefit(option, threshold),
       ...{ byProfile, byPayoff, ...(trace ? { trace } : {}) },

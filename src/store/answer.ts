@@ -2,8 +2,9 @@
  * The answer at one threshold: what the strip, the beam and the table show. Costs and
  * health are the base case's or the means of the draws; the chances are the draws' own.
  */
+
 import { againstComparator } from '../../shared/analysis/against-comparator.ts';
-import { toHealth } from '../../shared/analysis/direction.ts';
+import { optionsOf } from '../../shared/analysis/breakdown/options-of.ts';
 import { type IncrementalRow, incremental } from '../../shared/analysis/incremental.ts';
 import { netBenefit } from '../../shared/analysis/net-benefit.ts';
 import type { Option } from '../../shared/analysis/option.ts';
@@ -61,12 +62,7 @@ export interface Answer {
 
 /** @throws DocumentError `analysis.notFinite` */
 export function compare(document: ModelDocument, base: BaseRun): Comparison {
-  const { direction } = document.question.outcome;
-  const options = base.strategies.map(({ id, cost, outcome }) => ({
-    id,
-    cost,
-    health: toHealth(outcome, direction),
-  }));
+  const options = optionsOf(document, base.strategies);
   return { options, rows: incremental(options), errors: null };
 }
 
